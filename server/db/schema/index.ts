@@ -1,0 +1,4 @@
+export * from './estimates';
+export * from './people';
+export * from './practice';
+export * from './sets';
