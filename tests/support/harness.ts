@@ -9,8 +9,9 @@ import { composeServices } from '../../server/composition';
 import { openDatabase } from '../../server/db/client';
 import { migrateDatabase } from '../../server/db/migrate';
 import { loadReferenceData } from '../../server/reference-data/reference-data';
+import { ROOT } from './root';
 
-export const ROOT = join(__dirname, '../..');
+export { ROOT };
 export const PASSWORD = 'correct horse battery';
 
 /** A clock that tests move by hand. */
