@@ -31,12 +31,19 @@ export interface PaperFigure {
   readonly basis: string;
 }
 
-/** Input of the year scale's geometry. */
+/** Input of the year scale's geometry (`drawYearScale` with size `print`). */
 export interface PaperYearScale {
+  /** Formatted. */
   readonly price: string;
   readonly restated: string;
+  /** The same two amounts as numbers, for the height of the needles' heads alone. */
+  readonly priceAmount: number;
+  readonly restatedAmount: number;
   readonly from: string;
   readonly to: string;
+  /** The ends of the series: its first and newest published period. */
+  readonly first: string;
+  readonly last: string;
   /** Price restated to each published year, oldest first. */
   readonly curve: readonly { readonly year: number; readonly amount: number }[];
   readonly sentence: string;
