@@ -1,6 +1,12 @@
 import { midYear, type Period } from '../calendar/period';
-import type { Label, Tick } from './drawing';
-import { LEAST_PX_A_YEAR_DECADE_NUMERALS, LEAST_PX_A_YEAR_TICK, textWidth, type Measures } from './measures';
+import type { Label, Tick, YearScaleSize } from './drawing';
+import {
+  LEAST_PX_A_YEAR_DECADE_NUMERALS,
+  LEAST_PX_A_YEAR_TICK,
+  measuresFor,
+  textWidth,
+  type Measures,
+} from './measures';
 
 /** One decimal is finer than any screen or printer shows. */
 export const round1 = (value: number) => Math.round(value * 10) / 10;
@@ -28,8 +34,9 @@ export function yearAxis(first: Period, last: Period, width: number, measures: M
   };
 }
 
-/** The period's year on the axis at a place, for a pointer; may lie outside the axis. */
-export function timeAt(x: number, first: Period, last: Period, width: number, measures: Measures): number {
+/** The time, in years, at a place on the axis of a size, for a pointer; may lie outside the axis. */
+export function timeOnScale(x: number, first: Period, last: Period, width: number, size: YearScaleSize): number {
+  const measures = measuresFor(size, width);
   const begin = midYear(first);
   return begin + ((x - measures.left) / (width - measures.left - measures.right)) * (midYear(last) - begin);
 }
