@@ -1,0 +1,166 @@
+import type { Role } from '../access/policy';
+import type { Period } from '../calendar/period';
+import type { Stage, TaxTreatment } from '../estimate/terms';
+import type { Restatement } from '../restatement/restate';
+import type { Hazard } from '../sets/hazards';
+import type { SetKind, SetPart, ValueType, WorthKind } from '../sets/terms';
+
+/** What documents are written from. Amounts are decimal strings, dates ISO dates. */
+
+export interface PracticeForPaper {
+  readonly name: string;
+  /** Lines of text, may be empty. */
+  readonly address: string;
+  readonly phone: string;
+  readonly email: string;
+}
+
+/** Who prepared a document; a null role is the practice itself, writing from its records. */
+export interface Preparer {
+  readonly name: string;
+  readonly role: Role | null;
+}
+
+interface Money {
+  readonly amount: string;
+  readonly currency: string;
+}
+
+export interface WorthForPaper {
+  readonly kind: WorthKind;
+  readonly amount: Money;
+  readonly low: Money | null;
+  readonly high: Money | null;
+  readonly valueType: ValueType;
+  readonly effectiveOn: string;
+  readonly saidBy: string;
+  readonly basis: string;
+}
+
+export interface HazardForPaper {
+  readonly hazard: Hazard;
+  readonly volts: number | null;
+  readonly note: string;
+}
+
+export interface PriceForPaper {
+  readonly amount: string;
+  readonly currency: string;
+  readonly period: Period;
+  readonly source: string;
+}
+
+export interface SetForPaper {
+  readonly number: string;
+  readonly kind: SetKind;
+  readonly maker: string;
+  readonly model: string;
+  readonly description: string;
+  readonly chassis: string;
+  readonly serial: string;
+  readonly year: number | null;
+  readonly ownerName: string | null;
+  readonly priceWhenNew: PriceForPaper | null;
+  readonly provenance: string;
+  readonly alterations: string;
+  readonly hazards: readonly HazardForPaper[];
+  /** Newest first; the first of a part is its present condition. */
+  readonly condition: readonly {
+    readonly part: SetPart;
+    readonly grade: number;
+    readonly note: string;
+    readonly notedOn: string;
+  }[];
+  /** Newest first; the first of a kind is in force. */
+  readonly worths: readonly WorthForPaper[];
+}
+
+/** The price when new in the newest month's money, or why that is unknown. */
+export type RestatedForPaper =
+  | {
+      readonly known: true;
+      readonly restatement: Restatement;
+      readonly series: {
+        readonly title: string;
+        readonly publisher: string;
+        readonly publisherSeriesId: string;
+        readonly base: string;
+        readonly release: string;
+        readonly first: Period;
+        readonly last: Period;
+      };
+      readonly curve: readonly { readonly period: Period; readonly amount: string }[];
+    }
+  | { readonly known: false; readonly reason: string };
+
+interface Named {
+  readonly stage: Stage;
+  readonly description: string;
+}
+
+export type LineForPaper = Named &
+  (
+    | { readonly kind: 'labour'; readonly hours: ThreePoints; readonly rate: string }
+    | {
+        readonly kind: 'part';
+        readonly quantity: string;
+        readonly unitCost: string;
+        readonly markupPercent: string;
+      }
+    | { readonly kind: 'outside'; readonly quote: string; readonly markupPercent: string }
+  );
+
+interface ThreePoints {
+  readonly low: string;
+  readonly likely: string;
+  readonly high: string;
+}
+
+export interface SumsForPaper {
+  readonly labour: string;
+  readonly parts: string;
+  readonly outside: string;
+  readonly subtotal: string;
+  readonly taxable: string;
+  readonly tax: string;
+  readonly total: string;
+}
+
+export interface VerdictForPaper {
+  readonly asFound: string;
+  readonly asRestored: string;
+  readonly uplift: string;
+  readonly cost: ThreePoints;
+  readonly gap: { readonly atLow: string; readonly atLikely: string; readonly atHigh: string };
+  readonly words: string;
+  readonly basis: string;
+}
+
+export interface EstimateForPaper {
+  readonly number: string;
+  readonly title: string;
+  readonly taxTreatment: TaxTreatment;
+  readonly taxRatePercent: string;
+  readonly taxNote: string;
+  readonly depositPercent: string;
+  readonly notes: string;
+  readonly set: Pick<SetForPaper, 'number' | 'kind' | 'maker' | 'model' | 'year' | 'ownerName' | 'hazards' | 'worths'>;
+  /** In the order of the job: by stage, then as placed. */
+  readonly lines: readonly {
+    readonly content: LineForPaper;
+    readonly net: string;
+    readonly netLow: string;
+    readonly netHigh: string;
+  }[];
+  readonly totals: {
+    readonly currency: string;
+    readonly hours: ThreePoints;
+    readonly likely: SumsForPaper;
+    readonly low: SumsForPaper;
+    readonly high: SumsForPaper;
+    readonly deposit: string;
+    readonly stages: readonly { readonly stage: Stage; readonly hours: string; readonly subtotal: string }[];
+  };
+  /** Null where a worth is not on record. */
+  readonly verdict: VerdictForPaper | null;
+}
