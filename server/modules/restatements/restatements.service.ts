@@ -68,8 +68,11 @@ export function createRestatementsService({ referenceData }: { readonly referenc
     restatePrice(price: DatedPrice): RestatedPrice {
       const result = overTime(referenceData, price);
       if (!result.ok) return { known: false, reason: result.error.reason, neighbours: [...result.error.neighbours] };
-      const { bands, original: _, ...reply } = replyOf(result.value.series, result.value.restatement);
-      return { known: true, ...reply, ...bands };
+      const { series, release, from, to, factor, restated, bands, basis } = replyOf(
+        result.value.series,
+        result.value.restatement,
+      );
+      return { known: true, series, release, from, to, factor, restated, ...bands, basis };
     },
 
     /** A set's price when new in the newest month's money and in every published year's, for the year scale. */
