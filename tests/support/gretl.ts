@@ -1,5 +1,5 @@
 import { execFileSync } from 'node:child_process';
-import { existsSync, mkdirSync, readdirSync, readFileSync } from 'node:fs';
+import { existsSync, mkdirSync, readdirSync, readFileSync, renameSync } from 'node:fs';
 import { join } from 'node:path';
 import { gunzipSync } from 'node:zlib';
 import { ROOT } from './root';
@@ -21,7 +21,8 @@ export function openGretlData(): GretlData {
     run('apt-get', ['download', 'gretl-data'], scratch);
     const archive = readdirSync(scratch).find((file) => file.endsWith('.deb'));
     if (archive === undefined) return { available: false, reason: 'apt-get downloaded no package' };
-    run('dpkg-deb', ['-x', archive, 'unpacked'], scratch);
+    run('dpkg-deb', ['-x', archive, 'unpacking'], scratch);
+    renameSync(join(scratch, 'unpacking'), join(scratch, 'unpacked')); // so that a broken-off unpacking is no data
     return { available: true, folder };
   } catch (error) {
     return { available: false, reason: `apt cannot give gretl-data here (${lastLine(error)})` };
