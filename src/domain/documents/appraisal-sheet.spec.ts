@@ -34,7 +34,7 @@ it('shows the price when new to the cent and light, today’s money with «about
   });
   const now = figure(paper, 'In today’s money');
   expect(now).toMatchObject({ amount: 'about $538', weight: 'heavy' });
-  expect(now?.range).toBe('$536 to $539 by index rounding; $528 to $546 by month of 1938');
+  expect(now?.range).toBe('$537 to $539 by index rounding; $528 to $546 by month of 1938');
   expect(now?.basis).toMatch(/TEST0001, release 2026-07, 1938 average to Jul 2026/);
 });
 
