@@ -17,7 +17,7 @@ export interface YearScaleContent {
   readonly multipliers?: readonly { readonly period: Period; readonly multiplier: string }[];
 }
 
-/** The content as the geometry takes it: prices when new with cents, restated amounts whole from ten up. */
+/** The content as the geometry takes it: prices when new with cents, restated amounts whole from a hundred up. */
 export function yearScaleInput(content: YearScaleContent, size: YearScaleInput['size'], width: number): YearScaleInput {
   const { first, last, currency } = content;
   const restated = Number(content.restated);
@@ -44,5 +44,5 @@ export function yearScaleInput(content: YearScaleContent, size: YearScaleInput['
   };
 }
 
-/** From this amount on, cents say nothing that the index could support. */
-const WHOLE_FROM = 10;
+/** From this amount on, cents say more than an index of one decimal supports. */
+const WHOLE_FROM = 100;

@@ -1,0 +1,58 @@
+import { ChangeDetectionStrategy, Component, computed, input, signal } from '@angular/core';
+import { MatButton } from '@angular/material/button';
+import type { SeriesSummary } from '../../../contracts/series';
+import { formatPeriod } from '../../../domain/calendar/period';
+import { formatMoney } from '../../../domain/money/money';
+import { formatAbout } from '../../../domain/restatement/precision';
+import { averageYearlyRise, purchasingPower } from '../../../domain/restatement/readings';
+import { Figure } from '../../ui/figure';
+import {
+  formatBand,
+  formatFactor,
+  formatPurchasingPower,
+  periodWords,
+  type ShownRestatement,
+} from './shown-restatement';
+
+/** The restated amount with both of its bands, the multiplier, the yearly rise and what money buys. */
+@Component({
+  selector: 'tw-restated-figures',
+  imports: [Figure, MatButton],
+  templateUrl: './restated-figures.html',
+  styleUrl: './restated-figures.scss',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class RestatedFigures {
+  readonly shown = input.required<ShownRestatement>();
+  readonly series = input.required<SeriesSummary>();
+
+  protected readonly exact = signal(false);
+
+  protected readonly figures = computed(() => {
+    const shown = this.shown();
+    const { from, to, currency, withinYear } = shown;
+    const rise = averageYearlyRise(shown);
+    return {
+      restatedTo: `Restated to ${formatPeriod(to.period)}`,
+      about: formatAbout(shown, currency),
+      exact: formatMoney(shown.restated, currency),
+      rounding: formatBand(shown, shown.rounding),
+      within: withinYear ? formatBand(shown, withinYear) : 'Dated to the month',
+      withinLabel: `Any month of ${from.period.slice(0, 4)}`,
+      withinBasis: withinYear
+        ? `Paid in its dearest to its cheapest month, for a price dated ${from.period}`
+        : `${formatPeriod(from.period)} leaves no months open`,
+      factor: formatFactor(shown.factor),
+      indexes: `Index ${from.index}, then ${to.index}`,
+      base: `${this.series().publisherSeriesId}, ${this.series().base.replace('=', ' = ')}`,
+      rise: rise ? `${rise.percent.replace('-', '−')}%` : 'No time between',
+      riseKnown: rise !== null,
+      riseYears: rise ? `Compounded over ${rise.years} years` : '',
+      riseBasis: `${periodWords(from.period)} to ${periodWords(to.period)}`,
+      unitLabel: `${currency === 'USD' ? 'A dollar' : `One ${currency}`} of ${formatPeriod(to.period)} buys what`,
+      unit: formatPurchasingPower(purchasingPower(shown.factor), currency),
+      unitBought: `bought in ${formatPeriod(from.period)}`,
+      release: `${this.series().publisherSeriesId}, release ${shown.release}, ${periodWords(from.period)}`,
+    };
+  });
+}
