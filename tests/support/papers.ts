@@ -33,6 +33,7 @@ export const RISING_SERIES: IndexSeries = {
       period(`${1913 + i}`),
       risingIndex(1913 + i).toFixed(1),
     ]),
+    [period('1913-01'), '9.9'],
     [period('1938-01'), '20.6'],
     [period('1938-12'), '21.3'],
     [period('2026-07'), '281.437'],

@@ -13,6 +13,9 @@ const CELL_STYLES: Readonly<Record<Row['style'], TextStyle>> = {
   group: STYLES.cellStrong,
   total: STYLES.cellTotal,
 };
+const HEAD_HEIGHT = STYLES.tableHead.leading + 2;
+/** A table of so few rows stays on one page where a page can hold it. */
+const SHORT = 12;
 /** How much a long column asks for at most, so that it leaves room for others. */
 const MOST_ASKED = 420;
 
@@ -33,8 +36,12 @@ export function drawTable(sheet: Sheet, table: Table): void {
     sheet.rule(0.8, INK);
   };
 
-  const first = table.rows[0];
-  drawHeading(sheet, table.heading, STYLES.tableHead.leading + 2 + (first === undefined ? 0 : heightOf(first) + 20));
+  const kept = table.rows.slice(0, table.rows.length <= SHORT ? SHORT : 2);
+  drawHeading(
+    sheet,
+    table.heading,
+    kept.map(heightOf).reduce((sum, height) => sum + height, HEAD_HEIGHT),
+  );
   sheet.within('Table', () => {
     head();
     table.rows.forEach((row, i) => {
@@ -57,8 +64,8 @@ export function drawTable(sheet: Sheet, table: Table): void {
 }
 
 /**
- * Where the columns stand. Each asks for its widest cell; what is over goes to the first one, and where too little is
- * there, the right-aligned columns keep their width and the others share the rest by what they ask.
+ * Where the columns stand. Each asks for its widest cell; the right-aligned ones get that, and the others share what
+ * is left by what they ask, be it more or less.
  */
 function placeColumns(sheet: Sheet, table: Table): Pick<Cell, 'x' | 'width' | 'align'>[] {
   const asked = table.columns.map((column, i) => {
@@ -68,13 +75,9 @@ function placeColumns(sheet: Sheet, table: Table): Pick<Cell, 'x' | 'width' | 'a
   const room = sheet.width - GAP * (asked.length - 1);
   const sum = (widths: readonly number[]) => widths.reduce((total, width) => total + width, 0);
   const isRigid = (i: number) => table.columns[i]?.align === 'right';
-  const over = room - sum(asked);
   const rigid = sum(asked.filter((_, i) => isRigid(i)));
   const shared = sum(asked.filter((_, i) => !isRigid(i)));
-  const widths = asked.map((width, i) => {
-    if (over >= 0) return i === 0 ? width + over : width;
-    return isRigid(i) ? width : ((room - rigid) * width) / shared;
-  });
+  const widths = asked.map((width, i) => (isRigid(i) ? width : ((room - rigid) * width) / shared));
   let x = 0;
   return widths.map((width, i) => {
     const place = { x, width, align: table.columns[i]?.align ?? ('left' as const) };

@@ -1,5 +1,5 @@
-import type { Period } from '../../../src/domain/calendar/period';
 import type { PaperYearScale } from '../../../src/domain/documents/paper';
+import { paperYearScaleInput } from '../../../src/domain/documents/year-scale';
 import { drawYearScale, type Label, type Needle, type Segment } from '../../../src/domain/year-scale/geometry';
 import type { Sheet } from './pdf-page';
 import { CURVE, CURVE_GROUND, INK, INK_SOFT, NEEDLE, OUTLINE, PAPER, type Weight } from './pdf-style';
@@ -13,16 +13,7 @@ const TICK_WIDTHS = { year: 0.5, five: 0.7, decade: 1.2 } as const;
  * ring, the now needle thick with a solid disc.
  */
 export function drawYearScaleOn(sheet: Sheet, scale: PaperYearScale): void {
-  const drawing = drawYearScale({
-    size: 'print',
-    width: sheet.width,
-    first: scale.first as Period,
-    last: scale.last as Period,
-    then: { period: scale.from as Period, amount: scale.priceAmount, text: scale.price },
-    now: { period: scale.to as Period, amount: scale.restatedAmount, text: scale.restated },
-    curve: scale.curve,
-    formatAmount: String,
-  });
+  const drawing = drawYearScale(paperYearScaleInput(scale, 'print', sheet.width));
   sheet.keep(drawing.height + 6);
   const top = sheet.y;
   const { document } = sheet;
