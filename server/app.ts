@@ -67,7 +67,7 @@ export function createApp(deps: AppDeps): Express {
     passport.initialize(),
     passport.session(),
   ]);
-  app.use(accountsRoutes({ accounts: services.accounts, passport, now: deps.now }));
+  app.use(accountsRoutes({ accounts: services.accounts, passport }));
   app.use(practiceRoutes({ practice: services.practice }));
   app.use(ownersRoutes({ owners: services.owners }));
   app.use(setsRoutes({ sets: services.sets }));
