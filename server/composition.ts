@@ -9,6 +9,7 @@ import { createPapersService } from './modules/papers/papers.service';
 import { createPracticeRepo } from './modules/practice/practice.repo';
 import { createPracticeService } from './modules/practice/practice.service';
 import { createRestatementsService } from './modules/restatements/restatements.service';
+import { createPhotosRepo } from './modules/sets/photos.repo';
 import { createSetsRepo } from './modules/sets/sets.repo';
 import { createSetsService } from './modules/sets/sets.service';
 import type { ReferenceData } from './reference-data/reference-data';
@@ -35,7 +36,7 @@ export function composeServices(deps: {
     findCollectorByEmail: (email) => accountsRepo.findCollectorByEmail(email),
   });
   const accounts = createAccountsService({ repo: accountsRepo, now, practice, owners });
-  const sets = createSetsService({ repo: createSetsRepo(db), restatements, now });
+  const sets = createSetsService({ repo: createSetsRepo(db), photos: createPhotosRepo(db), restatements, now });
   const estimates = createEstimatesService({ repo: createEstimatesRepo(db), sets, practice, now });
   const papers = createPapersService({ sets, estimates, practice, restatements, fontsFolder, now });
   return { accounts, practice, owners, sets, estimates, papers, restatements };
