@@ -58,6 +58,11 @@ export class RestateForm {
     const last = this.chosen()?.last;
     return last === undefined ? '' : formatPeriod(last as Period);
   });
+  /** The newest published month, where the year it belongs to is the one asked for. */
+  protected readonly newestMonth = computed(() => {
+    const newest = splitPeriod(this.chosen()?.last ?? '');
+    return newest.year === splitPeriod(this.inquiry().to ?? '').year ? newest.month : null;
+  });
   protected readonly summary = computed(() => {
     const { to } = this.inquiry();
     return `To ${to && parsePeriod(to).ok ? formatPeriod(to as Period) : this.newest()}, by ${this.chosen()?.title ?? ''}.`;

@@ -40,7 +40,7 @@ export class RestatedFigures {
       within: withinYear ? formatBand(shown, withinYear) : 'Dated to the month',
       withinLabel: `Any month of ${from.period.slice(0, 4)}`,
       withinBasis: withinYear
-        ? `Paid in its dearest to its cheapest month, for a price dated ${from.period}`
+        ? `Paid when prices stood highest, to when lowest, in ${from.period}`
         : `${formatPeriod(from.period)} leaves no months open`,
       factor: formatFactor(shown.factor),
       indexes: `Index ${from.index}, then ${to.index}`,

@@ -52,9 +52,10 @@ export class TheSum {
     const shown = this.shown();
     const band = shown.withinYear;
     if (band === null || shown.from.period === shown.to.period) return null;
+    const year = formatPeriod(shown.from.period);
     return (
-      `The price is dated ${formatPeriod(shown.from.period)} without a month: paid in that year’s dearest month it would be ` +
-      `${formatFigure(shown, band.low)}, in its cheapest ${formatFigure(shown, band.high)}.`
+      `The price is dated ${year} without a month: paid when prices stood highest in ${year} it would come to ` +
+      `${formatFigure(shown, band.low)}, when lowest to ${formatFigure(shown, band.high)}.`
     );
   });
 }

@@ -1,6 +1,8 @@
 import { DOCUMENT } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import { Router } from '@angular/router';
+import { fromEvent } from 'rxjs';
 import { formatPeriod, type Period } from '../../../domain/calendar/period';
 import { CopyButton } from '../../ui/copy-button';
 import { Failed } from '../../ui/failed';
@@ -77,6 +79,14 @@ export class ThenAndNowPage {
       ? `The server cannot be reached. This is worked out here, from the figures of release ${this.store.shown()?.release} loaded before.`
       : 'The server cannot be reached. The last result stays until it can.';
   });
+
+  constructor() {
+    const window = this.document.defaultView;
+    if (window === null) return;
+    fromEvent(window, 'online')
+      .pipe(takeUntilDestroyed())
+      .subscribe(() => this.store.retry());
+  }
 
   protected moveThen(from: Period): void {
     this.address.change({ ...this.store.inquiry(), from }, 'then-needle');

@@ -112,6 +112,7 @@ export class YearlyChart {
             color: colours.soft,
             maxRotation: 0,
             maxTicksLimit: 12,
+            includeBounds: false,
             precision: 0,
             callback: (value) => (Number.isInteger(Number(value)) ? String(value) : ''),
           },
