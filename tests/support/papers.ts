@@ -242,3 +242,6 @@ export const appraisalSheet = (changes: Partial<Parameters<typeof buildAppraisal
 
 export const restorationEstimate = (changes: Partial<EstimateForPaper> = {}) =>
   buildRestorationEstimate({ estimate: { ...ESTIMATE, ...changes }, practice: PRACTICE, ...PREPARED });
+
+/** Every amount written in a text, each once. */
+export const amountsIn = (text: string): string[] => [...new Set(text.match(/[−+]?\$[\d,]*\d(?:\.\d\d)?/g))];
