@@ -36,6 +36,10 @@ describe('other readings of the same sum', () => {
     expect(expectOk(decadeMultipliers(SAMPLE, '1940' as Period))).toEqual([{ period: '1940', multiplier: '1.0' }]);
   });
 
+  it('keeps two digits where prices were lower', () => {
+    expect(expectOk(decadeMultipliers(SAMPLE, '1933' as Period))).toEqual([{ period: '1940', multiplier: '0.93' }]); // 13.0 ÷ 14.0
+  });
+
   it('refuses a target without a figure', () => {
     expect(decadeMultipliers(SAMPLE, '2025-10' as Period)).toMatchObject({ ok: false, error: { which: 'to' } });
   });

@@ -24,7 +24,7 @@ export function averageYearlyRise(restatement: {
 /** What one unit of the later money bought in the earlier period: 1 ÷ factor, four decimals. */
 export const purchasingPower = (factor: string): string => new Dec(1).div(factor).toFixed(4);
 
-/** I(to) ÷ I(year) for each year of the series that begins a decade, one decimal, oldest first. */
+/** I(to) ÷ I(year) for each year of the series that begins a decade, oldest first: one decimal, two digits below 1. */
 export function decadeMultipliers(
   series: IndexSeries,
   to: Period,
@@ -34,6 +34,8 @@ export function decadeMultipliers(
   return ok(
     annualAverages(series)
       .filter(({ period }) => yearOf(period) % 10 === 0)
-      .map(({ period, index }) => ({ period, multiplier: new Dec(toIndex).div(index).toFixed(1) })),
+      .map(({ period, index }) => ({ period, multiplier: multiplierText(new Dec(toIndex).div(index)) })),
   );
 }
+
+const multiplierText = (factor: Dec) => (factor.lt(1) ? factor.toSignificantDigits(2).toFixed() : factor.toFixed(1));

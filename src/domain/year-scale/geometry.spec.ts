@@ -172,6 +172,18 @@ it('names the second band by its period', () => {
   expect(multipliers?.factors).toHaveLength(3);
 });
 
+it('leaves out a multiplier that the band’s title would cross', () => {
+  const factors = (width: number) => drawYearScale(input({ width })).multipliers?.factors.map(({ x }) => x) ?? [];
+  expect(factors(1296)).toHaveLength(3);
+  expect(factors(700)).toEqual([]); // 1920 alone is lettered and has one
+});
+
+it('puts the amounts in the order of their needles when both stand on one period', () => {
+  const { then, now } = drawYearScale(input({ from: '1941', to: '1941' }));
+  expect(then.amount!.x).toBeLessThan(now.amount!.x);
+  expect(then.tag!.x).toBeLessThan(now.tag!.x);
+});
+
 it('says itself in a sentence', () => {
   const whole = input();
   expect(drawYearScale({ ...whole, now: { ...whole.now, text: '$3,802' } }).sentence).toBe(

@@ -123,15 +123,19 @@ function drawMultipliers(
 ): YearScaleDrawing['multipliers'] {
   if (!measures.multipliers || !measures.numerals || !input.multipliers) return null;
   const { y, rule, size } = measures.multipliers;
+  const title = (at: number, text: string): Label => ({ x: 20, y: at, text, anchor: 'start', size });
+  const titles = [title(measures.numerals.y, 'Year'), title(y, `To ${formatPeriod(input.now.period)}`)];
+  const clearOf = Math.max(...titles.map((label) => label.x + textWidth(label.text, size))) + 6;
   const multipliers = new Map(input.multipliers.map((entry) => [entry.year, entry.multiplier]));
   const factors = numerals.flatMap(({ year, label }): Label[] => {
     const multiplier = multipliers.get(year);
-    return multiplier === undefined ? [] : [{ x: label.x, y, text: `× ${multiplier}`, anchor: 'middle', size }];
+    const text = `× ${multiplier}`;
+    if (multiplier === undefined || label.x - textWidth(text, size) / 2 < clearOf) return [];
+    return [{ x: label.x, y, text, anchor: 'middle', size }];
   });
-  const title = (at: number, text: string): Label => ({ x: 20, y: at, text, anchor: 'start', size });
   return {
     rule: { x1: 20, y1: rule, x2: input.width - measures.right, y2: rule },
-    titles: [title(measures.numerals.y, 'Year'), title(y, `To ${formatPeriod(input.now.period)}`)],
+    titles,
     factors,
   };
 }

@@ -60,6 +60,8 @@ function badness(
   if (crossed(then, nowX)) bad += 40;
   // A lower needle begins under the first row, so it cannot cross what stands there.
   if (then.row === now.row && crossed(now, thenX)) bad += 40;
+  // Amounts stand in the order of their needles, where both are possible.
+  if (then.row === now.row && thenX <= nowX !== then.from <= now.from) bad += 3;
   if (then.side !== prefer.then) bad += 1;
   if (now.side !== prefer.now) bad += 1;
   return bad;

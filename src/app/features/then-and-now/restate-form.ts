@@ -11,7 +11,7 @@ import { formatPeriod, parsePeriod, type Period } from '../../../domain/calendar
 import { fieldError, zodField } from '../../core/form-problems';
 import { inquiryKey, joinPeriod, splitPeriod, type Inquiry } from './inquiry';
 
-const year = z.string().regex(/^\d{4}$/, 'Use a year of four digits, such as 1941.');
+const year = z.string().regex(/^\d{4}$/, 'Such as 1941.');
 
 const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'].map((name, i) => ({
   value: String(i + 1).padStart(2, '0'),

@@ -32,16 +32,19 @@ export class RestatedFigures {
     const shown = this.shown();
     const { from, to, currency, withinYear } = shown;
     const rise = averageYearlyRise(shown);
+    const same = from.period === to.period;
     return {
       restatedTo: `Restated to ${formatPeriod(to.period)}`,
       about: formatAbout(shown, currency),
       exact: formatMoney(shown.restated, currency),
-      rounding: formatBand(shown, shown.rounding),
-      within: withinYear ? formatBand(shown, withinYear) : 'Dated to the month',
+      rounding: same ? null : formatBand(shown, shown.rounding),
+      within: same ? 'Nothing left open' : withinYear ? formatBand(shown, withinYear) : 'Dated to the month',
       withinLabel: `Any month of ${from.period.slice(0, 4)}`,
-      withinBasis: withinYear
-        ? `Paid when prices stood highest, to when lowest, in ${from.period}`
-        : `${formatPeriod(from.period)} leaves no months open`,
+      withinBasis: same
+        ? 'Both periods are the same'
+        : withinYear
+          ? `Paid when prices stood highest, to when lowest, in ${from.period}`
+          : `${formatPeriod(from.period)} leaves no months open`,
       factor: formatFactor(shown.factor),
       indexes: `Index ${from.index}, then ${to.index}`,
       base: `${this.series().publisherSeriesId}, ${this.series().base.replace('=', ' = ')}`,

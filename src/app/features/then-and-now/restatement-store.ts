@@ -103,6 +103,11 @@ export class RestatementStore {
     return reply?.kind === 'failed' ? reply.problem : null;
   });
 
+  /** True while there is nothing to show yet and an answer is on its way. */
+  readonly awaited = computed(
+    () => this.shown() === null && this.request() !== null && this.refused() === null && this.problem() === null,
+  );
+
   /** The index with all its figures, once loaded, if it is the one shown. */
   readonly shownIndex = computed(() => {
     const index = this.index();
