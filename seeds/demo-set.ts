@@ -116,4 +116,4 @@ export const mainsSet = (volts: number, note = ''): HazardEntry[] => [highVoltag
 
 export const front = (caption = 'Front, as received'): Picture => ({ view: 'front', caption });
 export const detail = (caption: string): Picture => ({ view: 'detail', caption });
-export const chassis = (caption = 'Chassis from above, before cleaning'): Picture => ({ view: 'chassis', caption });
+export const chassis = (caption = 'Chassis from above'): Picture => ({ view: 'chassis', caption });

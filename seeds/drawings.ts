@@ -1,9 +1,11 @@
 import sharp from 'sharp';
-import type { Pen } from './drawing-parts';
+import type { Box, Pen } from './drawing-parts';
 import { drawChassis, FRONTS, type Shape } from './drawing-shapes';
 
-const WIDTH = 1600;
-const HEIGHT = 1200;
+/** Of the picture, in pixels; shapes are drawn on a sheet of 1600 × 1200 units. */
+const WIDTH = 1280;
+const HEIGHT = 960;
+const SHEET: Box = [0, 0, 1600, 1200];
 
 /** The product's own inks (light theme of the design tokens). */
 const INK = '#0E1B25';
@@ -15,7 +17,7 @@ const GLOW = '#FFECC4';
 const DARK = '#435866';
 
 /**
- * A drawn stand-in for a photograph, as JPEG bytes of 1600 × 1200 px. The same shape, view and seed always give the same
+ * A drawn stand-in for a photograph, as JPEG bytes of 1280 × 960 px. The same shape, view and seed always give the same
  * picture; another seed gives other proportions, knobs and shades.
  */
 export async function drawPicture(options: {
@@ -41,7 +43,7 @@ export function drawSvg({ shape, view, seed }: Parameters<typeof drawPicture>[0]
   };
   const ground = pick(GROUNDS, vary);
   const { drawing, nearer, whole } = view === 'chassis' ? drawChassis(pen) : FRONTS[shape](pen);
-  const [x, y, w, h] = view === 'detail' ? nearer : (whole ?? [0, 0, WIDTH, HEIGHT]);
+  const [x, y, w, h] = view === 'detail' ? nearer : (whole ?? SHEET);
   return [
     `<svg xmlns="http://www.w3.org/2000/svg" width="${WIDTH}" height="${HEIGHT}" viewBox="${x} ${y} ${w} ${h}" preserveAspectRatio="xMidYMid slice">`,
     `<rect x="-800" y="-600" width="3200" height="2400" fill="${ground}"/>`,

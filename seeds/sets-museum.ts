@@ -51,7 +51,7 @@ export const MUSEUM_SETS: readonly DemoSet[] = [
       },
     ],
     shape: 'horn',
-    pictures: [front('Complete, as shown in the gallery'), detail('Horn and elbow')],
+    pictures: [front('Complete, as shown in the gallery'), detail('Horn from the front')],
   },
   {
     registered: 640,
@@ -115,7 +115,7 @@ export const MUSEUM_SETS: readonly DemoSet[] = [
     ],
     opinions: [{ after: 45, by: 'appraiser', basis: BASIS.asking, found: ['180', '140', '220'] }],
     shape: 'suitcase',
-    pictures: [front('Open, crank in its clip')],
+    pictures: [front('Open')],
   },
   {
     registered: 560,
@@ -196,7 +196,7 @@ export const MUSEUM_SETS: readonly DemoSet[] = [
       },
     ],
     shape: 'receiver',
-    pictures: [front('Receiver, lid on')],
+    pictures: [front('Receiver')],
   },
   {
     registered: 455,
@@ -241,7 +241,7 @@ export const MUSEUM_SETS: readonly DemoSet[] = [
       },
     ],
     shape: 'combination',
-    pictures: [front('Front, lid down'), detail('Dial and escutcheon')],
+    pictures: [front(), detail('Dial and knobs')],
   },
   {
     registered: 310,
@@ -269,7 +269,6 @@ export const MUSEUM_SETS: readonly DemoSet[] = [
       },
     ],
     opinions: [{ after: 20, by: 'appraiser', basis: BASIS.asking, found: ['1500', '1100', '2000'] }],
-    shape: 'amplifier',
   },
   {
     registered: 205,

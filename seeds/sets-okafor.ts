@@ -69,11 +69,7 @@ export const OKAFOR_SETS: readonly DemoSet[] = [
       },
     ],
     shape: 'console',
-    pictures: [
-      front('Front, as received'),
-      detail('Dial glass, cracked across the short-wave scale'),
-      chassis('Chassis out, from above'),
-    ],
+    pictures: [front(), detail('Dial and knobs'), chassis('Chassis out, from above')],
   },
   {
     registered: 262,
@@ -117,7 +113,7 @@ export const OKAFOR_SETS: readonly DemoSet[] = [
       },
     ],
     shape: 'table',
-    pictures: [front(), chassis('Chassis from above; all five tubes original')],
+    pictures: [front(), chassis()],
   },
   {
     registered: 474,
@@ -157,7 +153,7 @@ export const OKAFOR_SETS: readonly DemoSet[] = [
       },
     ],
     shape: 'cabinet-phonograph',
-    pictures: [front('Front, doors shut'), detail('Louvres and left door')],
+    pictures: [front('Front, doors shut'), detail('Louvres')],
   },
   {
     registered: 398,
@@ -204,7 +200,7 @@ export const OKAFOR_SETS: readonly DemoSet[] = [
       },
     ],
     shape: 'television-table',
-    pictures: [front(), chassis('Chassis from above, cage closed')],
+    pictures: [front(), chassis()],
   },
   {
     registered: 330,
@@ -238,7 +234,7 @@ export const OKAFOR_SETS: readonly DemoSet[] = [
       { after: 9, by: 'restorer', basis: BASIS.bench, found: ['90', '60', '110'], restored: ['240', '200', '280'] },
     ],
     shape: 'portable',
-    pictures: [front('Front, lid and tag with the set')],
+    pictures: [front()],
   },
   {
     registered: 121,
@@ -316,7 +312,7 @@ export const OKAFOR_SETS: readonly DemoSet[] = [
       { after: 14, by: 'restorer', basis: BASIS.bench, found: ['120', '80', '160'], restored: ['480', '400', '600'] },
     ],
     shape: 'combination',
-    pictures: [front('Front, doors open'), chassis()],
+    pictures: [front(), chassis()],
   },
   {
     registered: 545,
@@ -354,7 +350,7 @@ export const OKAFOR_SETS: readonly DemoSet[] = [
       },
     ],
     shape: 'horn',
-    pictures: [front('Complete, horn fitted'), detail('Horn, inside paint original')],
+    pictures: [front('Complete, horn fitted'), detail('Horn from the front')],
   },
   {
     registered: 188,
@@ -393,6 +389,6 @@ export const OKAFOR_SETS: readonly DemoSet[] = [
       },
     ],
     shape: 'amplifier-pair',
-    pictures: [front('Both amplifiers, covers on'), chassis('B60-0441 from above'), chassis('B60-0442 from above')],
+    pictures: [front('Both amplifiers'), chassis('B60-0441 from above'), chassis('B60-0442 from above')],
   },
 ];

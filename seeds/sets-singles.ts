@@ -48,7 +48,7 @@ export const SINGLE_SETS: readonly DemoSet[] = [
       },
     ],
     shape: 'amplifier',
-    pictures: [front('In its wood case'), chassis()],
+    pictures: [front(), chassis()],
   },
   {
     registered: 84,
@@ -120,7 +120,7 @@ export const SINGLE_SETS: readonly DemoSet[] = [
       },
     ],
     shape: 'receiver',
-    pictures: [front('Panel; the meter is a later addition')],
+    pictures: [front('Panel, as received')],
   },
   {
     registered: 61,
@@ -256,7 +256,7 @@ export const SINGLE_SETS: readonly DemoSet[] = [
       },
     ],
     shape: 'amplifier',
-    pictures: [chassis('Amplifier from above, cover missing')],
+    pictures: [chassis('Amplifier from above')],
   },
   {
     registered: 270,

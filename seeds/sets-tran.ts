@@ -47,7 +47,7 @@ export const TRAN_SETS: readonly DemoSet[] = [
     ],
     opinions: [{ after: 6, by: 'restorer', basis: BASIS.bench, found: ['220', '160', '280'] }],
     shape: 'console',
-    pictures: [front(), detail('Push buttons; two caps missing')],
+    pictures: [front(), detail('Dial and knobs')],
   },
   {
     registered: 655,
@@ -129,7 +129,7 @@ export const TRAN_SETS: readonly DemoSet[] = [
       },
     ],
     shape: 'television-table',
-    pictures: [front(), detail('Screen and tuning knobs'), chassis()],
+    pictures: [front(), detail('Screen and knobs'), chassis()],
   },
   {
     registered: 288,
@@ -166,7 +166,7 @@ export const TRAN_SETS: readonly DemoSet[] = [
       { after: 12, by: 'restorer', basis: BASIS.bench, found: ['60', '30', '90'], restored: ['320', '250', '400'] },
     ],
     shape: 'television-console',
-    pictures: [front('Front, left door missing')],
+    pictures: [front()],
   },
   {
     registered: 150,
@@ -206,7 +206,7 @@ export const TRAN_SETS: readonly DemoSet[] = [
       },
     ],
     shape: 'table',
-    pictures: [front('Front, with its box behind')],
+    pictures: [front()],
   },
   {
     registered: 96,

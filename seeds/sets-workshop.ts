@@ -176,7 +176,6 @@ export const WORKSHOP_SETS: readonly DemoSet[] = [
         restored: ['1350', '1150', '1550'],
       },
     ],
-    shape: 'amplifier',
   },
   {
     registered: 300,
@@ -234,7 +233,6 @@ export const WORKSHOP_SETS: readonly DemoSet[] = [
         },
       },
     ],
-    shape: 'table',
   },
   {
     registered: 110,
@@ -268,7 +266,6 @@ export const WORKSHOP_SETS: readonly DemoSet[] = [
         restored: ['260', '220', '300'],
       },
     ],
-    shape: 'suitcase',
   },
   {
     registered: 18,
@@ -296,7 +293,7 @@ export const WORKSHOP_SETS: readonly DemoSet[] = [
       },
     ],
     shape: 'console',
-    pictures: [front(), chassis('Rear view through the opening')],
+    pictures: [front(), chassis('Chassis, still in the cabinet')],
   },
   {
     registered: 4,
