@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { ROLES } from '../domain/access/policy';
 import { LINE_KINDS, STAGES, TAX_TREATMENTS } from '../domain/estimate/terms';
 import {
   amount,
@@ -123,6 +124,7 @@ export const estimateDetail = z.object({
   /** Offered to new lines. */
   defaults: z.object({ labourRate: z.string(), partsMarkupPercent: z.string(), outsideMarkupPercent: z.string() }),
   preparedBy: z.string(),
+  preparedByRole: z.enum(ROLES),
   archived: z.boolean(),
   createdAt: instant,
   updatedAt: instant,

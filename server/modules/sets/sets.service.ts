@@ -184,6 +184,10 @@ export function createSetsService(deps: {
       return { items, total: items.length };
     },
 
+    /** The recorded worths of sets that the caller has already found with a proof of its own, by set. */
+    worthsOf: (setIds: readonly number[]): ReadonlyMap<number, readonly Worth[]> =>
+      groupBy(repo.worths([...new Set(setIds)]), ({ setId }) => setId, shownWorth),
+
     picture(auth: Authorized<'set.view'>, photoId: number, size: 'large' | 'small'): Buffer {
       const bytes = photos.picture(auth, photoId, size);
       if (bytes === undefined) throw new ProblemError('not-found');
@@ -296,4 +300,10 @@ function knownOwner<T>(write: () => T): T {
       throw fieldError('ownerId', 'There is no such owner. Choose one of the list or add one.');
     throw error;
   }
+}
+
+function groupBy<T, K, V>(items: readonly T[], keyOf: (item: T) => K, valueOf: (item: T) => V): Map<K, V[]> {
+  const groups = new Map<K, V[]>();
+  for (const item of items) groups.set(keyOf(item), [...(groups.get(keyOf(item)) ?? []), valueOf(item)]);
+  return groups;
 }
