@@ -1,6 +1,9 @@
 import type { Role } from '../access/policy';
 import type { Period } from '../calendar/period';
-import type { Stage, TaxTreatment } from '../estimate/terms';
+import type { Line } from '../estimate/line';
+import type { TaxTreatment } from '../estimate/terms';
+import type { Totals } from '../estimate/totals';
+import type { Verdict } from '../estimate/verdict';
 import type { Restatement } from '../restatement/restate';
 import type { Hazard } from '../sets/hazards';
 import type { SetKind, SetPart, ValueType, WorthKind } from '../sets/terms';
@@ -93,49 +96,6 @@ export type RestatedForPaper =
     }
   | { readonly known: false; readonly reason: string };
 
-interface Named {
-  readonly stage: Stage;
-  readonly description: string;
-}
-
-export type LineForPaper = Named &
-  (
-    | { readonly kind: 'labour'; readonly hours: ThreePoints; readonly rate: string }
-    | {
-        readonly kind: 'part';
-        readonly quantity: string;
-        readonly unitCost: string;
-        readonly markupPercent: string;
-      }
-    | { readonly kind: 'outside'; readonly quote: string; readonly markupPercent: string }
-  );
-
-interface ThreePoints {
-  readonly low: string;
-  readonly likely: string;
-  readonly high: string;
-}
-
-export interface SumsForPaper {
-  readonly labour: string;
-  readonly parts: string;
-  readonly outside: string;
-  readonly subtotal: string;
-  readonly taxable: string;
-  readonly tax: string;
-  readonly total: string;
-}
-
-export interface VerdictForPaper {
-  readonly asFound: string;
-  readonly asRestored: string;
-  readonly uplift: string;
-  readonly cost: ThreePoints;
-  readonly gap: { readonly atLow: string; readonly atLikely: string; readonly atHigh: string };
-  readonly words: string;
-  readonly basis: string;
-}
-
 export interface EstimateForPaper {
   readonly number: string;
   readonly title: string;
@@ -147,20 +107,12 @@ export interface EstimateForPaper {
   readonly set: Pick<SetForPaper, 'number' | 'kind' | 'maker' | 'model' | 'year' | 'ownerName' | 'hazards' | 'worths'>;
   /** In the order of the job: by stage, then as placed. */
   readonly lines: readonly {
-    readonly content: LineForPaper;
+    readonly content: Line;
     readonly net: string;
     readonly netLow: string;
     readonly netHigh: string;
   }[];
-  readonly totals: {
-    readonly currency: string;
-    readonly hours: ThreePoints;
-    readonly likely: SumsForPaper;
-    readonly low: SumsForPaper;
-    readonly high: SumsForPaper;
-    readonly deposit: string;
-    readonly stages: readonly { readonly stage: Stage; readonly hours: string; readonly subtotal: string }[];
-  };
+  readonly totals: Totals;
   /** Null where a worth is not on record. */
-  readonly verdict: VerdictForPaper | null;
+  readonly verdict: Verdict | null;
 }

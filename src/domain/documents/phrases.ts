@@ -1,10 +1,11 @@
 import { ROLE_LABELS } from '../access/policy';
 import { formatDate } from '../calendar/period';
+import type { Verdict } from '../estimate/verdict';
 import { Dec } from '../money/decimal';
 import { formatMoney } from '../money/money';
 import { CAUTION_LIMITS, CAUTIONS } from '../sets/hazards';
 import { SET_KIND_LABELS, VALUE_TYPE_LABELS, WORTH_KIND_LABELS, type WorthKind } from '../sets/terms';
-import type { HazardForPaper, PracticeForPaper, Preparer, SetForPaper, VerdictForPaper, WorthForPaper } from './inputs';
+import type { HazardForPaper, PracticeForPaper, Preparer, SetForPaper, WorthForPaper } from './inputs';
 import type { Paper, PaperCostAgainstWorth, PaperFigure, PaperSection } from './paper';
 
 /** Wording and small parts that every document shares. */
@@ -67,7 +68,7 @@ export function worthFigure(worths: readonly WorthForPaper[], kind: WorthKind): 
 
 /** The chart's input, where there is a verdict. Numbers serve the drawing alone. */
 export function costAgainstWorthOf(
-  verdict: VerdictForPaper | null,
+  verdict: Verdict | null,
   worths: readonly WorthForPaper[],
   currency: string,
 ): PaperCostAgainstWorth | null {
@@ -92,7 +93,7 @@ export function costAgainstWorthOf(
 
 /** Cost against worth in words: the sum, its basis, and what to keep in mind; or what is missing for it. */
 export function costAgainstWorthInWords(
-  verdict: VerdictForPaper | null,
+  verdict: Verdict | null,
   worths: readonly WorthForPaper[],
   currency: string,
 ): string[] {
@@ -113,7 +114,6 @@ export function costAgainstWorthInWords(
       `at high hours (${money(cost.high)}) ${money(gap.atHigh, true)}.`,
     `Basis: ${verdict.basis}`,
     ...mixedValueTypes(worths),
-    'A set can be worth restoring for reasons no sum holds. The choice is the owner’s.',
   ];
 }
 

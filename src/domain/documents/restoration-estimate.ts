@@ -1,7 +1,9 @@
+import type { Line } from '../estimate/line';
 import { Dec } from '../money/decimal';
 import { formatMoney } from '../money/money';
 import { LINE_KIND_LABELS, STAGE_LABELS, STAGES, TAX_TREATMENT_LABELS } from '../estimate/terms';
-import type { EstimateForPaper, LineForPaper, PracticeForPaper, Preparer } from './inputs';
+import { hasRange } from '../estimate/totals';
+import type { EstimateForPaper, PracticeForPaper, Preparer } from './inputs';
 import type { Paper, PaperFigure, PaperSection } from './paper';
 import {
   capacityOf,
@@ -82,12 +84,11 @@ function totalFigure({ lines, totals }: EstimateForPaper): PaperFigure {
   if (lines.length === 0)
     return { label, amount: 'Not priced yet', weight: 'words', range: null, basis: 'No work has been entered.' };
   const { likely, low, high, currency, hours } = totals;
-  const moves = low.total !== high.total;
   return {
     label,
     amount: formatMoney(likely.total, currency),
     weight: 'heavy',
-    range: moves ? `${formatMoney(low.total, currency)} to ${formatMoney(high.total, currency)}` : null,
+    range: hasRange(totals) ? `${formatMoney(low.total, currency)} to ${formatMoney(high.total, currency)}` : null,
     basis: `Tax included, ${plainNumber(hours.likely)} h of work at likely hours`,
   };
 }
@@ -109,7 +110,7 @@ function depositFigure({ lines, totals, depositPercent }: EstimateForPaper): Pap
 }
 
 /** Hours at likely, or the quantity of a part. */
-function measureOf(content: LineForPaper): string {
+function measureOf(content: Line): string {
   if (content.kind === 'labour') return `${plainNumber(content.hours.likely)} h`;
   return content.kind === 'part' ? plainNumber(content.quantity) : '';
 }
@@ -193,13 +194,12 @@ const TAXED = {
 function rangeInWords({ totals }: EstimateForPaper): PaperSection {
   const { currency, hours, likely, low, high } = totals;
   const money = (amount: string) => formatMoney(amount, currency);
-  const paragraph =
-    low.total === high.total
-      ? `The likely cost is ${money(likely.total)}. Its hours are fixed, so it moves only if the work does.`
-      : `The likely cost is ${money(likely.total)}, for ${plainNumber(hours.likely)} hours of work. ` +
-        `If every job ran to its low hours (${plainNumber(hours.low)}), it would be ${money(low.total)}; ` +
-        `if every job ran to its high hours (${plainNumber(hours.high)}), ${money(high.total)}. ` +
-        'Parts and outside work stand as quoted in all three.';
+  const paragraph = !hasRange(totals)
+    ? `The likely cost is ${money(likely.total)}. Its hours are fixed, so it moves only if the work does.`
+    : `The likely cost is ${money(likely.total)}, for ${plainNumber(hours.likely)} hours of work. ` +
+      `If every job ran to its low hours (${plainNumber(hours.low)}), it would be ${money(low.total)}; ` +
+      `if every job ran to its high hours (${plainNumber(hours.high)}), ${money(high.total)}. ` +
+      'Parts and outside work stand as quoted in all three.';
   return { type: 'paragraphs', heading: 'How far it may move', paragraphs: [paragraph] };
 }
 
