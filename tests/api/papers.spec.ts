@@ -103,20 +103,9 @@ const ofEstimate = (ending = '') => `/api/estimates/${estimate.id}/restoration-e
 const paperAt = async (agent: TestAgent, address: string) =>
   ((await agent.get(address).expect(200)) as { body: Paper }).body;
 const fileAt = async (agent: TestAgent, address: string) => {
-  const reply = await agent
-    .get(address)
-    .buffer(true)
-    .parse(bytes)
-    .expect(200)
-    .expect('Content-Type', 'application/pdf');
+  const reply = await agent.get(address).responseType('blob').expect(200).expect('Content-Type', 'application/pdf');
   return { bytes: reply.body as Buffer, disposition: reply.headers['content-disposition'] as string };
 };
-
-function bytes(res: NodeJS.ReadableStream, done: (error: Error | null, body: Buffer) => void): void {
-  const chunks: Buffer[] = [];
-  res.on('data', (chunk: Buffer) => chunks.push(chunk));
-  res.on('end', () => done(null, Buffer.concat(chunks)));
-}
 
 describe('the appraisal sheet', () => {
   it('says who prepared it and in what capacity, and that it is a working sheet', async () => {

@@ -81,6 +81,8 @@ export const SET: SetForPaper = {
   ],
   worths: [
     {
+      id: 9,
+      recordedAt: '2026-05-01T09:00:00Z',
       kind: 'as-restored',
       amount: usd('950.00'),
       low: usd('850.00'),
@@ -91,6 +93,8 @@ export const SET: SetForPaper = {
       basis: 'Four sales of like sets, 2025 and 2026.',
     },
     {
+      id: 8,
+      recordedAt: '2026-05-01T09:00:00Z',
       kind: 'as-found',
       amount: usd('140.00'),
       low: null,
@@ -101,6 +105,8 @@ export const SET: SetForPaper = {
       basis: 'Two sales of unrestored sets.',
     },
     {
+      id: 7,
+      recordedAt: '2026-05-01T09:00:00Z',
       kind: 'as-found',
       amount: usd('999.00'),
       low: null,

@@ -1,4 +1,5 @@
 import { formatDate, formatPeriod, yearOf } from '../calendar/period';
+import { worthInForce } from '../market/worth';
 import { formatMoney } from '../money/money';
 import { describePeriod } from '../restatement/basis';
 import { formatAbout } from '../restatement/precision';
@@ -31,7 +32,6 @@ import {
   paragraphsOf,
   practiceHead,
   worthFigure,
-  worthInForce,
   worthRange,
 } from './phrases';
 
@@ -209,7 +209,7 @@ function priceSections(price: PriceForPaper | null, restated: RestatedForPaper |
     const reason = restated === null ? 'It has not been restated.' : restated.reason;
     return [{ type: 'facts', heading, rows: [...rows, { label: 'In today’s money', value: reason }] }];
   }
-  const { restatement, series } = restated;
+  const { restatement } = restated;
   const { rounding, withinYear, from, to } = restatement;
   const exactBand = (band: { readonly low: string; readonly high: string }) =>
     `${formatMoney(band.low, price.currency)} to ${formatMoney(band.high, price.currency)}`;
@@ -255,7 +255,7 @@ const capitalised = (text: string) => text.charAt(0).toUpperCase() + text.slice(
 function worthTable(worths: readonly WorthForPaper[]): PaperSection {
   const found = worthInForce(worths, 'as-found');
   const restored = worthInForce(worths, 'as-restored');
-  if (found === null && restored === null)
+  if (found === undefined && restored === undefined)
     return {
       type: 'paragraphs',
       heading: 'Worth',
@@ -263,7 +263,7 @@ function worthTable(worths: readonly WorthForPaper[]): PaperSection {
     };
   const row = (label: string, say: (worth: WorthForPaper) => string) => ({
     style: 'plain' as const,
-    cells: [label, ...[found, restored].map((worth) => (worth === null ? 'Not on record' : say(worth)))],
+    cells: [label, ...[found, restored].map((worth) => (worth === undefined ? 'Not on record' : say(worth)))],
   });
   return {
     type: 'table',

@@ -30,6 +30,9 @@ interface Money {
 }
 
 export interface WorthForPaper {
+  readonly id: number;
+  /** ISO instant. */
+  readonly recordedAt: string;
   readonly kind: WorthKind;
   readonly amount: Money;
   readonly low: Money | null;
@@ -74,7 +77,6 @@ export interface SetForPaper {
     readonly note: string;
     readonly notedOn: string;
   }[];
-  /** Newest first; the first of a kind is in force. */
   readonly worths: readonly WorthForPaper[];
 }
 

@@ -1,6 +1,7 @@
 import { ROLE_LABELS } from '../access/policy';
 import { formatDate } from '../calendar/period';
 import type { Verdict } from '../estimate/verdict';
+import { worthInForce } from '../market/worth';
 import { Dec } from '../money/decimal';
 import { formatMoney } from '../money/money';
 import { CAUTION_LIMITS, CAUTIONS } from '../sets/hazards';
@@ -37,10 +38,6 @@ export function capacityOf(preparer: Preparer, practice: PracticeForPaper): stri
   return `${ROLE_LABELS[preparer.role].toLowerCase()}, ${practice.name}`;
 }
 
-/** The worth of a kind in force: the newest on record. */
-export const worthInForce = (worths: readonly WorthForPaper[], kind: WorthKind): WorthForPaper | null =>
-  worths.find((worth) => worth.kind === kind) ?? null;
-
 /** `$380 to $520`, or null where no range is on record. */
 export function worthRange(worth: WorthForPaper): string | null {
   const { low, high } = worth;
@@ -56,7 +53,8 @@ const NO_WORTH: Readonly<Record<WorthKind, string>> = {
 export function worthFigure(worths: readonly WorthForPaper[], kind: WorthKind): PaperFigure {
   const worth = worthInForce(worths, kind);
   const label = WORTH_KIND_LABELS[kind];
-  if (worth === null) return { label, amount: 'Not on record', weight: 'words', range: null, basis: NO_WORTH[kind] };
+  if (worth === undefined)
+    return { label, amount: 'Not on record', weight: 'words', range: null, basis: NO_WORTH[kind] };
   return {
     label,
     amount: exactMoney(worth.amount.amount, worth.amount.currency),
@@ -99,7 +97,7 @@ export function costAgainstWorthInWords(
 ): string[] {
   if (verdict === null) {
     const missing = (['as-found', 'as-restored'] as const)
-      .filter((kind) => worthInForce(worths, kind) === null)
+      .filter((kind) => worthInForce(worths, kind) === undefined)
       .map((kind) => WORTH_KIND_LABELS[kind].toLowerCase());
     const what = missing.length === 0 ? 'A figure' : `The ${missing.join(' and the ')}`;
     return [`${what} is not on record, so the cost of the work cannot be set against what it adds.`];
@@ -120,7 +118,7 @@ export function costAgainstWorthInWords(
 function mixedValueTypes(worths: readonly WorthForPaper[]): string[] {
   const found = worthInForce(worths, 'as-found');
   const restored = worthInForce(worths, 'as-restored');
-  if (found === null || restored === null || found.valueType === restored.valueType) return [];
+  if (found === undefined || restored === undefined || found.valueType === restored.valueType) return [];
   return [
     `The two worths are of different types: ${VALUE_TYPE_LABELS[found.valueType].toLowerCase()} as found, ` +
       `${VALUE_TYPE_LABELS[restored.valueType].toLowerCase()} restored. Their difference mixes the two.`,
