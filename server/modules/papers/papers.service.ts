@@ -26,7 +26,7 @@ export interface PaperFile {
   readonly bytes: Buffer;
 }
 
-interface OnPaper {
+export interface OnPaper {
   readonly paper?: PaperSize | undefined;
 }
 

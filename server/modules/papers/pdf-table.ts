@@ -64,8 +64,8 @@ export function drawTable(sheet: Sheet, table: Table): void {
 }
 
 /**
- * Where the columns stand. Each asks for its widest cell; the right-aligned ones get that, and the others share what
- * is left by what they ask, be it more or less.
+ * Where the columns stand. Each asks for its widest cell; the right-aligned ones all get what the widest of them
+ * asks, and the others share what is left by what they ask, be it more or less.
  */
 function placeColumns(sheet: Sheet, table: Table): Pick<Cell, 'x' | 'width' | 'align'>[] {
   const asked = table.columns.map((column, i) => {
@@ -75,9 +75,10 @@ function placeColumns(sheet: Sheet, table: Table): Pick<Cell, 'x' | 'width' | 'a
   const room = sheet.width - GAP * (asked.length - 1);
   const sum = (widths: readonly number[]) => widths.reduce((total, width) => total + width, 0);
   const isRigid = (i: number) => table.columns[i]?.align === 'right';
-  const rigid = sum(asked.filter((_, i) => isRigid(i)));
+  const rigid = Math.max(0, ...asked.filter((_, i) => isRigid(i)));
+  const free = room - rigid * asked.filter((_, i) => isRigid(i)).length;
   const shared = sum(asked.filter((_, i) => !isRigid(i)));
-  const widths = asked.map((width, i) => (isRigid(i) ? width : ((room - rigid) * width) / shared));
+  const widths = asked.map((width, i) => (isRigid(i) ? rigid : (free * width) / shared));
   let x = 0;
   return widths.map((width, i) => {
     const place = { x, width, align: table.columns[i]?.align ?? ('left' as const) };
