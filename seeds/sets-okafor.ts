@@ -17,7 +17,7 @@ import {
 /** Wren Okafor's collection: the demo collector's own. */
 export const OKAFOR_SETS: readonly DemoSet[] = [
   {
-    registered: 236,
+    registered: 26,
     owner: 'okafor',
     kind: 'radio',
     maker: 'Halloway',
@@ -51,7 +51,7 @@ export const OKAFOR_SETS: readonly DemoSet[] = [
         },
       },
       {
-        after: 96,
+        after: 22,
         parts: {
           finish: [3, 'Cleaned and waxed; water ring lighter.'],
           cabinet: [4, 'Veneer glued down at the foot.'],

@@ -296,7 +296,7 @@ export const WORKSHOP_SETS: readonly DemoSet[] = [
     pictures: [front(), chassis('Chassis, still in the cabinet')],
   },
   {
-    registered: 4,
+    registered: 41,
     owner: null,
     kind: 'amplifier',
     maker: 'Brackwell',
