@@ -8,7 +8,7 @@ import {
 } from '../../../contracts/papers';
 import type { Paper } from '../../../domain/documents/paper';
 import { PAPER_SIZES, type PaperSize } from '../../../domain/estimate/terms';
-import { ApiClient } from '../../core/api-client';
+import { addressOf, ApiClient } from '../../core/api-client';
 
 /** The addresses of a document's files, a paper each. */
 export type PaperFiles = readonly { readonly size: PaperSize; readonly address: string }[];
@@ -28,11 +28,11 @@ export class PapersApi {
 
   appraisalSheetFiles(setId: number, estimateId?: number): PaperFiles {
     const estimate = estimateId === undefined ? '' : `&estimateId=${estimateId}`;
-    return filesAt(getAppraisalSheetPdf.path.replace(':id', String(setId)), estimate);
+    return filesAt(addressOf(getAppraisalSheetPdf, { id: setId }), estimate);
   }
 
   restorationEstimateFiles(id: number): PaperFiles {
-    return filesAt(getRestorationEstimatePdf.path.replace(':id', String(id)));
+    return filesAt(addressOf(getRestorationEstimatePdf, { id }));
   }
 }
 

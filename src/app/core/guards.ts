@@ -1,0 +1,25 @@
+import { inject } from '@angular/core';
+import { Router, type CanActivateFn } from '@angular/router';
+import type { Action } from '../../domain/access/policy';
+import { SessionStore } from './session';
+
+/** Only for people signed in; others go to sign in and come back. */
+export const signedIn: CanActivateFn = (_route, state) =>
+  inject(SessionStore).user() !== null ||
+  inject(Router).createUrlTree(['/sign-in'], { queryParams: { then: state.url } });
+
+/** Only for those whom the access policy allows the action. */
+export const allowed =
+  (action: Action): CanActivateFn =>
+  (route, state) => {
+    const session = inject(SessionStore);
+    if (session.user() === null) return signedIn(route, state);
+    return session.can(action) || inject(Router).createUrlTree(['/not-allowed']);
+  };
+
+/** A clean practice names its first administrator before anything else. */
+export const setUpFirst: CanActivateFn = (_route, state) =>
+  inject(SessionStore).session()?.needsSetup !== true ||
+  state.url.startsWith('/set-up') ||
+  state.url.startsWith('/then-and-now') ||
+  inject(Router).createUrlTree(['/set-up']);
