@@ -46,7 +46,7 @@ const poppler = hasTool('pdftotext');
       for (const words of [paper.title, paper.subtitle, paper.standing, paper.preparedBy.name])
         expect(text).toContain(words);
       for (const section of paper.sections)
-        if (section.type === 'paragraphs')
+        if ('paragraphs' in section)
           for (const paragraph of section.paragraphs) expect(text).toContain(oneSpaced(paragraph));
     });
   });

@@ -1,6 +1,7 @@
 import { formatDate } from '../../../src/domain/calendar/period';
-import type { Paper, PaperSection } from '../../../src/domain/documents/paper';
+import type { Paper, PaperCostAgainstWorth, PaperSection } from '../../../src/domain/documents/paper';
 import type { PaperSize } from '../../../src/domain/estimate/terms';
+import { costChartHeight, drawCostChart } from './pdf-cost-chart';
 import { drawFigures } from './pdf-figures';
 import { Sheet } from './pdf-page';
 import { INK, OUTLINE, STYLES, type FontBytes } from './pdf-style';
@@ -29,7 +30,7 @@ export function renderPaperPdf(
   drawHead(sheet, paper);
   if (paper.figures.length > 0) drawFigures(sheet, paper.figures);
   if (paper.yearScale !== null) drawYearScaleOn(sheet, paper.yearScale);
-  for (const section of paper.sections) sheet.within('Sect', () => drawSection(sheet, section));
+  for (const section of paper.sections) sheet.within('Sect', () => drawSection(sheet, section, paper.costAgainstWorth));
   drawFooters(sheet, paper);
   return sheet.finish();
 }
@@ -55,30 +56,53 @@ function drawHead(sheet: Sheet, paper: Paper): void {
   drawParagraph(sheet, paper.standing, STYLES.standing, { below: 8 });
 }
 
-function drawSection(sheet: Sheet, section: PaperSection): void {
-  if (section.type === 'table') {
-    drawTable(sheet, section);
-    return;
+function drawSection(sheet: Sheet, section: PaperSection, chart: PaperCostAgainstWorth | null): void {
+  switch (section.type) {
+    case 'table':
+      drawTable(sheet, section);
+      break;
+    case 'facts':
+      drawFacts(sheet, section);
+      break;
+    case 'paragraphs':
+      drawHeading(sheet, section.heading);
+      for (const paragraph of section.paragraphs) drawParagraph(sheet, paragraph);
+      break;
+    case 'cost-against-worth':
+      drawHeading(sheet, section.heading, chart === null ? undefined : costChartHeight(sheet, chart));
+      if (chart !== null) drawCostChart(sheet, chart);
+      for (const paragraph of section.paragraphs) drawParagraph(sheet, paragraph);
+      break;
+    case 'cautions':
+      drawHeading(sheet, section.heading);
+      for (const { title, whatToDo } of section.items) drawCaution(sheet, title, whatToDo);
+      drawParagraph(sheet, section.note, STYLES.note);
   }
-  drawHeading(sheet, section.heading);
-  if (section.type === 'paragraphs') {
-    for (const paragraph of section.paragraphs) drawParagraph(sheet, paragraph);
-    return;
-  }
-  if (section.type === 'facts') {
-    for (const { label, value } of section.rows)
-      drawRow(
-        sheet,
-        [
-          { text: label, x: 0, width: FACT_LABEL_WIDTH - 12, style: STYLES.strong, tag: 'P' },
-          { text: value, x: FACT_LABEL_WIDTH, width: sheet.width - FACT_LABEL_WIDTH, style: STYLES.body, tag: 'P' },
-        ],
-        { below: 2 },
-      );
-    return;
-  }
-  for (const { title, whatToDo } of section.items) drawCaution(sheet, title, whatToDo);
-  drawParagraph(sheet, section.note, STYLES.note);
+}
+
+const FACT_GAP = 2;
+/** So few facts stay on one page. */
+const FEW_FACTS = 12;
+
+function drawFacts(sheet: Sheet, { heading, rows }: Extract<PaperSection, { type: 'facts' }>): void {
+  const value = { x: FACT_LABEL_WIDTH, width: sheet.width - FACT_LABEL_WIDTH, style: STYLES.body, tag: 'P' };
+  const heightOf = (text: string) =>
+    wrap(sheet, text, value.style, value.width).length * value.style.leading + FACT_GAP;
+  const kept = rows.slice(0, rows.length <= FEW_FACTS ? FEW_FACTS : 2);
+  drawHeading(
+    sheet,
+    heading,
+    kept.reduce((sum, row) => sum + heightOf(row.value), 0),
+  );
+  for (const row of rows)
+    drawRow(
+      sheet,
+      [
+        { text: row.label, x: 0, width: FACT_LABEL_WIDTH - 12, style: STYLES.strong, tag: 'P' },
+        { ...value, text: row.value },
+      ],
+      { below: FACT_GAP },
+    );
 }
 
 const CAUTION_INDENT = 12;

@@ -30,6 +30,13 @@ export const CURVE = '#0A5C68';
 export const CURVE_GROUND = '#E3EEF0';
 export const NEEDLE = '#CC3A14';
 export const PAPER = '#FFFFFF';
+export const FOUND = '#50636F';
+export const UPLIFT = CURVE;
+export const UPLIFT_GROUND = '#CBE3E6';
+export const COST = '#12222C';
+export const COST_RANGE = '#B4C1C9';
+export const GAIN = '#17663C';
+export const LOSS = '#97283F';
 
 /** Size and line height in points. */
 export interface TextStyle {
@@ -66,5 +73,6 @@ export const STYLES = {
   figureHeavy: style('black', 21, 26, INK),
   figureWords: style('bold', 11, 26, INK),
   figureRange: style('bold', 8.2, 10.8, INK),
+  chart: style('regular', 7.9, 10.5, INK),
   footer: style('regular', 7.4, 10, INK_VARIANT),
 } as const satisfies Record<string, TextStyle>;

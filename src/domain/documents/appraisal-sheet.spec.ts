@@ -90,7 +90,7 @@ it('says that no recorded hazard does not mean safe', () => {
 it('carries the chart and the verdict of the estimate', () => {
   const paper = appraisalSheet();
   expect(paper.costAgainstWorth).toMatchObject({ asFound: 140, asRestored: 950, restoredLow: 850, restoredHigh: 1100 });
-  const words = section(paper, 'paragraphs', 'Cost against worth').paragraphs.join(' ');
+  const words = section(paper, 'cost-against-worth', 'Cost against worth').paragraphs.join(' ');
   expect(words).toContain('At the likely cost the work adds more than it costs');
   for (const amount of ['$668.84', '+$810', '+$141.16', '−$151.34']) expect(words).toContain(amount);
 });

@@ -70,7 +70,9 @@ export function buildAppraisalSheet(options: {
     ],
     yearScale: yearScaleOf(set.priceWhenNew, restated),
     costAgainstWorth:
-      estimate === null ? null : costAgainstWorthOf(estimate.verdict, set.worths, estimate.totals.currency),
+      estimate === null || estimate.lines.length === 0
+        ? null
+        : costAgainstWorthOf(estimate.verdict, set.worths, estimate.totals.currency),
     sections: [
       costSection(set, estimate),
       identity(set),
@@ -91,24 +93,17 @@ export function buildAppraisalSheet(options: {
 }
 
 function costSection(set: SetForPaper, estimate: EstimateForPaper | null): PaperSection {
-  const heading = 'Cost against worth';
-  if (estimate === null)
-    return {
-      type: 'paragraphs',
-      heading,
-      paragraphs: ['No estimate of the work is on record, so there is no cost to set against the worth.'],
-    };
-  const { currency } = estimate.totals;
-  if (estimate.lines.length === 0)
-    return { type: 'paragraphs', heading, paragraphs: [`Estimate ${estimate.number} has nothing priced yet.`] };
-  return {
-    type: 'paragraphs',
-    heading,
-    paragraphs: [
-      `Estimate ${estimate.number}, ${estimate.title}: ${formatMoney(estimate.totals.likely.total, currency)} likely, tax included.`,
-      ...costAgainstWorthInWords(estimate.verdict, set.worths, currency),
-    ],
-  };
+  return { type: 'cost-against-worth', heading: 'Cost against worth', paragraphs: costInWords(set, estimate) };
+}
+
+function costInWords(set: SetForPaper, estimate: EstimateForPaper | null): string[] {
+  if (estimate === null) return ['No estimate of the work is on record, so there is no cost to set against the worth.'];
+  const { currency, likely } = estimate.totals;
+  if (estimate.lines.length === 0) return [`Estimate ${estimate.number} has nothing priced yet.`];
+  return [
+    `Estimate ${estimate.number}, ${estimate.title}: ${formatMoney(likely.total, currency)} likely, tax included.`,
+    ...costAgainstWorthInWords(estimate.verdict, set.worths, currency),
+  ];
 }
 
 function identity(set: SetForPaper): PaperSection {

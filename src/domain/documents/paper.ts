@@ -67,6 +67,8 @@ export type PaperSection =
       readonly rows: readonly { readonly label: string; readonly value: string }[];
     }
   | { readonly type: 'paragraphs'; readonly heading: string; readonly paragraphs: readonly string[] }
+  /** The document's `costAgainstWorth` chart, where it has one, above its words. */
+  | { readonly type: 'cost-against-worth'; readonly heading: string; readonly paragraphs: readonly string[] }
   | {
       readonly type: 'table';
       readonly heading: string;

@@ -61,7 +61,7 @@ export function buildRestorationEstimate(options: {
       ...(priced
         ? [
             {
-              type: 'paragraphs' as const,
+              type: 'cost-against-worth' as const,
               heading: 'Cost against worth',
               paragraphs: costAgainstWorthInWords(verdict, set.worths, totals.currency),
             },
