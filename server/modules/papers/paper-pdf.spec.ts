@@ -106,6 +106,22 @@ const poppler = hasTool('pdftotext');
     }
   });
 
+  it('draws the year scale and the chart as vectors, with the screen’s own words', async () => {
+    const pdf = await pdfOf(appraisalSheet());
+    const text = pdfText(pdf);
+    for (const words of ['1950', '2010', '$140 as found', '+$810', '$950 restored', 'likely $669'])
+      expect(text).toContain(words);
+    expect(text).toMatch(/Worth beyond the cost/);
+    expect(tell('pdfimages', ['-list', '-'], pdf).trim().split('\n')).toHaveLength(2); // its two lines of heading
+  });
+
+  it('says a loss as plainly as a gain', async () => {
+    const verdict = { ...ESTIMATE.verdict!, asRestored: '400.00', uplift: '260.00' };
+    const text = pdfText(await pdfOf(restorationEstimate({ verdict })));
+    expect(text).toContain('Cost beyond the worth');
+    expect(text).not.toContain('Worth beyond the cost');
+  });
+
   it('keeps a short table whole', async () => {
     const pages = (lines: number) => restorationEstimate({ lines: manyLines.slice(0, lines) });
     for (let lines = 20; lines < 60; lines += 3) {
