@@ -7,6 +7,8 @@ type Table = Extract<PaperSection, { type: 'table' }>;
 type Row = Table['rows'][number];
 
 const GAP = 12;
+/** Keeps a text that just fits from being broken by rounding. */
+const SLACK = 0.5;
 const PADDING = 2.6;
 const CELL_STYLES: Readonly<Record<Row['style'], TextStyle>> = {
   plain: STYLES.cell,
@@ -14,8 +16,8 @@ const CELL_STYLES: Readonly<Record<Row['style'], TextStyle>> = {
   total: STYLES.cellTotal,
 };
 const HEAD_HEIGHT = STYLES.tableHead.leading + 2;
-/** A table of so few rows stays on one page where a page can hold it. */
-const SHORT = 12;
+/** A table that takes at most this share of a page stays on one. */
+const SHORT = 0.35;
 /** How much a long column asks for at most, so that it leaves room for others. */
 const MOST_ASKED = 420;
 
@@ -36,12 +38,9 @@ export function drawTable(sheet: Sheet, table: Table): void {
     sheet.rule(0.8, INK);
   };
 
-  const kept = table.rows.slice(0, table.rows.length <= SHORT ? SHORT : 2);
-  drawHeading(
-    sheet,
-    table.heading,
-    kept.map(heightOf).reduce((sum, height) => sum + height, HEAD_HEIGHT),
-  );
+  const sumOf = (rows: readonly Row[]) => rows.reduce((sum, row) => sum + heightOf(row), HEAD_HEIGHT);
+  const whole = sumOf(table.rows);
+  drawHeading(sheet, table.heading, whole <= SHORT * sheet.pageHeight ? whole : sumOf(table.rows.slice(0, 3)));
   sheet.within('Table', () => {
     head();
     table.rows.forEach((row, i) => {
@@ -64,24 +63,30 @@ export function drawTable(sheet: Sheet, table: Table): void {
 }
 
 /**
- * Where the columns stand. Each asks for its widest cell; the right-aligned ones all get what the widest of them
- * asks, and the others share what is left by what they ask, be it more or less.
+ * Where the columns stand. The right-aligned ones all get what the widest of them asks; the others get their longest
+ * word and share what is left by how much more they ask.
  */
 function placeColumns(sheet: Sheet, table: Table): Pick<Cell, 'x' | 'width' | 'align'>[] {
-  const asked = table.columns.map((column, i) => {
-    const cells = table.rows.map((row) => widthOf(sheet, row.cells[i] ?? '', CELL_STYLES[row.style]));
-    return Math.min(MOST_ASKED, Math.max(widthOf(sheet, column.label, STYLES.tableHead), ...cells) + 0.5);
+  const columns = table.columns.map(({ label, align }, i) => {
+    const texts = table.rows.map((row) => ({ text: row.cells[i] ?? '', style: CELL_STYLES[row.style] }));
+    const all = [{ text: label, style: STYLES.tableHead }, ...texts];
+    const widest = Math.max(...all.map(({ text, style }) => widthOf(sheet, text, style)));
+    const words = all.flatMap(({ text, style }) => text.split(/\s+/).map((word) => widthOf(sheet, word, style)));
+    const least = Math.min(Math.max(...words) + SLACK, sheet.width / table.columns.length);
+    return { align, least, asked: Math.max(least, Math.min(MOST_ASKED, widest + SLACK)) };
   });
-  const room = sheet.width - GAP * (asked.length - 1);
   const sum = (widths: readonly number[]) => widths.reduce((total, width) => total + width, 0);
-  const isRigid = (i: number) => table.columns[i]?.align === 'right';
-  const rigid = Math.max(0, ...asked.filter((_, i) => isRigid(i)));
-  const free = room - rigid * asked.filter((_, i) => isRigid(i)).length;
-  const shared = sum(asked.filter((_, i) => !isRigid(i)));
-  const widths = asked.map((width, i) => (isRigid(i) ? rigid : (free * width) / shared));
+  const figures = columns.filter(({ align }) => align === 'right');
+  const texts = columns.filter(({ align }) => align === 'left');
+  const figureWidth = Math.max(0, ...figures.map(({ asked }) => asked));
+  const room = sheet.width - GAP * (columns.length - 1) - figureWidth * figures.length;
+  const spare = room - sum(texts.map(({ least }) => least));
+  const wanted = texts.map(({ asked, least }) => asked - least + SLACK);
   let x = 0;
-  return widths.map((width, i) => {
-    const place = { x, width, align: table.columns[i]?.align ?? ('left' as const) };
+  return columns.map(({ align, least, asked }) => {
+    const share = (spare * (asked - least + SLACK)) / sum(wanted);
+    const width = align === 'right' ? figureWidth : least + share;
+    const place = { x, width, align };
     x += width + GAP;
     return place;
   });

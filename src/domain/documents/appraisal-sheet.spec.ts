@@ -30,7 +30,7 @@ it('shows the price when new to the cent and light, today’s money with «about
     amount: '$39.95',
     weight: 'light',
     range: null,
-    basis: 'Maker’s price list, 1938',
+    basis: 'In 1938. Source: Maker’s price list',
   });
   const now = figure(paper, 'In today’s money');
   expect(now).toMatchObject({ amount: 'about $538', weight: 'heavy' });

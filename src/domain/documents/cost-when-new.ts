@@ -16,7 +16,7 @@ export function priceFigure(price: PriceForPaper | null): PaperFigure {
     amount: formatMoney(price.amount, price.currency),
     weight: 'light',
     range: null,
-    basis: `${price.source}, ${formatPeriod(price.period)}`,
+    basis: `In ${formatPeriod(price.period)}. Source: ${price.source}`,
   };
 }
 

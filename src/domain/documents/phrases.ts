@@ -60,7 +60,7 @@ export function worthFigure(worths: readonly WorthForPaper[], kind: WorthKind): 
     amount: exactMoney(worth.amount.amount, worth.amount.currency),
     weight: 'heavy',
     range: worthRange(worth),
-    basis: `${VALUE_TYPE_LABELS[worth.valueType]}, says ${worth.saidBy}, effective ${formatDate(worth.effectiveOn)}`,
+    basis: `${VALUE_TYPE_LABELS[worth.valueType]}, effective ${formatDate(worth.effectiveOn)}, says ${worth.saidBy}`,
   };
 }
 

@@ -41,6 +41,11 @@ it('sums by kind with tax by category, its rate and its note, and the deposit', 
   expect(table.note).toBe('Parts are taxed. Sample state rule.');
 });
 
+it('a kind of work that the estimate lacks has no row', () => {
+  const rows = rowsOf(restorationEstimate({ lines: ESTIMATE.lines.slice(0, 3) }), 'What it comes to').rows;
+  expect(rows.map((row) => row.cells[0])).not.toContain('Outside work');
+});
+
 it('says the range in words', () => {
   const words = wordsOf(restorationEstimate(), 'How far it may move');
   for (const amount of ['$506.34', '$668.84', '$961.34']) expect(words).toContain(amount);

@@ -1,8 +1,8 @@
 import type { Line } from '../estimate/line';
 import { Dec } from '../money/decimal';
 import { formatMoney } from '../money/money';
-import { LINE_KIND_LABELS, STAGE_LABELS, STAGES, TAX_TREATMENT_LABELS } from '../estimate/terms';
-import { hasRange } from '../estimate/totals';
+import { LINE_KIND_LABELS, STAGE_LABELS, STAGES, TAX_TREATMENT_LABELS, type LineKind } from '../estimate/terms';
+import { hasRange, type Sums } from '../estimate/totals';
 import type { EstimateForPaper, PracticeForPaper, Preparer } from './inputs';
 import type { Paper, PaperFigure, PaperSection } from './paper';
 import {
@@ -147,10 +147,10 @@ function stageTable({ lines, totals }: EstimateForPaper): PaperSection {
 }
 
 function sumsTable(estimate: EstimateForPaper): PaperSection {
-  const { totals, taxTreatment, taxNote, depositPercent } = estimate;
+  const { lines, totals, taxTreatment, taxNote, depositPercent } = estimate;
   const { currency, likely, low, high } = totals;
   const money = (amount: string) => formatMoney(amount, currency);
-  const row = (label: string, pick: (sums: typeof likely) => string, style: 'plain' | 'total' = 'plain') => ({
+  const row = (label: string, pick: (sums: Sums) => string, style: 'plain' | 'total' = 'plain') => ({
     style,
     cells: [label, ...[low, likely, high].map((sums) => money(pick(sums)))],
   });
@@ -170,9 +170,9 @@ function sumsTable(estimate: EstimateForPaper): PaperSection {
       { label: 'At high hours', align: 'right' },
     ],
     rows: [
-      row('Labour', (sums) => sums.labour),
-      row('Parts', (sums) => sums.parts),
-      row('Outside work', (sums) => sums.outside),
+      ...KINDS.filter(({ kind }) => lines.some(({ content }) => content.kind === kind)).map(({ label, pick }) =>
+        row(label, pick),
+      ),
       row('Before tax', (sums) => sums.subtotal),
       ...taxRows,
       row('Total', (sums) => sums.total, 'total'),
@@ -183,6 +183,13 @@ function sumsTable(estimate: EstimateForPaper): PaperSection {
     note: [`${TAX_TREATMENT_LABELS[taxTreatment]}.`, taxNote].filter((text) => text !== '').join(' '),
   };
 }
+
+/** Kinds of work as the sums name them; a kind without lines has no row. */
+const KINDS: readonly { readonly kind: LineKind; readonly label: string; readonly pick: (sums: Sums) => string }[] = [
+  { kind: 'labour', label: 'Labour', pick: (sums) => sums.labour },
+  { kind: 'part', label: 'Parts', pick: (sums) => sums.parts },
+  { kind: 'outside', label: 'Outside work', pick: (sums) => sums.outside },
+];
 
 /** The row that names what of the subtotal bears tax. */
 const TAXED = {
