@@ -1,9 +1,7 @@
 import { provideHttpClient } from '@angular/common/http';
 import { HttpTestingController, provideHttpClientTesting, type TestRequest } from '@angular/common/http/testing';
-import { Component } from '@angular/core';
+import { Component, input } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
-import { MatIconRegistry } from '@angular/material/icon';
-import { DomSanitizer } from '@angular/platform-browser';
 import { provideRouter, Router } from '@angular/router';
 import { RouterTestingHarness } from '@angular/router/testing';
 import { toIndexSeries } from '../../../contracts/series';
@@ -11,12 +9,16 @@ import type { Period } from '../../../domain/calendar/period';
 import type { PlainDecimal } from '../../../domain/money/money';
 import { restate } from '../../../domain/restatement/restate';
 import { expectOk } from '../../../domain/result';
+import { provideIcons } from '../../ui/provide-icons';
 import { FIGURES, SERIES } from './testing';
 import { ThenAndNowPage } from './then-and-now-page';
 import { YearlyChart } from './yearly-chart';
 
 @Component({ selector: 'tw-yearly-chart', template: '' })
-class NoChart {}
+class NoChart {
+  readonly shown = input();
+  readonly series = input();
+}
 
 const index = toIndexSeries(SERIES, FIGURES);
 const wait = (ms: number) => new Promise((resolve) => setTimeout(resolve, ms));
@@ -49,11 +51,12 @@ function answer(request: TestRequest) {
   });
 }
 
+/** Lets so much time pass. Not `whenStable`: that waits for answers which the specs have yet to give. */
 const settle = async (ms = 0) => {
-  await wait(ms);
-  harness.detectChanges();
-  await harness.fixture.whenStable();
-  harness.detectChanges();
+  for (const pause of [ms, 0, 0]) {
+    await wait(pause);
+    harness.detectChanges();
+  }
 };
 const asked = () => http.match((request) => request.url.startsWith('/api/restatements'));
 const text = () => page.textContent?.replace(/\s+/g, ' ') ?? '';
@@ -67,14 +70,12 @@ async function open(address: string, figures = true) {
   TestBed.overrideComponent(ThenAndNowPage, { remove: { imports: [YearlyChart] }, add: { imports: [NoChart] } });
   TestBed.configureTestingModule({
     providers: [
+      provideIcons(),
       provideHttpClient(),
       provideHttpClientTesting(),
       provideRouter([{ path: 'then-and-now', component: ThenAndNowPage }]),
     ],
   });
-  const icon = TestBed.inject(DomSanitizer).bypassSecurityTrustHtml('<svg></svg>');
-  for (const name of ['link', 'close', 'check', 'content_copy'])
-    TestBed.inject(MatIconRegistry).addSvgIconLiteral(name, icon);
   http = TestBed.inject(HttpTestingController);
   harness = await RouterTestingHarness.create();
   await harness.navigateByUrl(address);
@@ -196,6 +197,7 @@ it('says that the server cannot be reached, goes on from the figures at hand, an
 it('offers to try again when the series did not load', async () => {
   TestBed.configureTestingModule({
     providers: [
+      provideIcons(),
       provideHttpClient(),
       provideHttpClientTesting(),
       provideRouter([{ path: 'then-and-now', component: ThenAndNowPage }]),
