@@ -1,4 +1,5 @@
 import { formatMoney } from '../money/money';
+import { textWidth } from '../year-scale/measures';
 import { moneyAxis } from './axis';
 
 /** Amounts in currency units. */
@@ -170,13 +171,19 @@ function besideWorth(
   const uplift = asRestored - asFound;
   const sign = uplift > 0 ? '+' : uplift < 0 ? '−' : '';
   const above = worthY - 0.5 * em;
+  const found = `${whole(asFound)} as found`;
+  const added = `${sign}${whole(Math.abs(uplift))}`;
+  const restored = `${whole(asRestored)} restored`;
+  const barEnd = x(Math.max(asFound, asRestored));
+  // over a short bar the two would run into each other; then the uplift stands behind the worth restored
+  const apart = x(0) + textWidth(found, em) + em < barEnd - textWidth(added, em);
   return [
-    { x: x(0), y: round(above), text: `${whole(asFound)} as found`, anchor: 'start' },
-    { x: x(Math.max(asFound, asRestored)), y: round(above), text: `${sign}${whole(Math.abs(uplift))}`, anchor: 'end' },
+    { x: x(0), y: round(above), text: found, anchor: 'start' },
+    ...(apart ? [{ x: barEnd, y: round(above), text: added, anchor: 'end' as const }] : []),
     {
       x: round(x(end) + 0.8 * em),
       y: round(worthY + bar / 2 + 0.35 * em),
-      text: `${whole(asRestored)} restored`,
+      text: apart ? restored : `${restored}, ${added}`,
       anchor: 'start',
     },
   ];
