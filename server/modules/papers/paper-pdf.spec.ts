@@ -106,6 +106,15 @@ const poppler = hasTool('pdftotext');
     }
   });
 
+  it('breaks no word of a table that a column can hold', async () => {
+    const said = 'Nell Harrow, restorer, Quayside Set Works, after a talk with two dealers and one collector';
+    const paper = appraisalSheet({
+      set: { ...SET, worths: SET.worths.map((worth) => ({ ...worth, saidBy: said, basis: said })) },
+    });
+    const words = new Set(tell('pdftotext', ['-raw', '-', '-'], await pdfOf(paper)).split(/\s+/));
+    for (const word of `Worth Range Type Effective Who says so Basis ${said}`.split(' ')) expect(words).toContain(word);
+  });
+
   it('draws the year scale and the chart as vectors, with the screen’s own words', async () => {
     const pdf = await pdfOf(appraisalSheet());
     const text = pdfText(pdf);
