@@ -16,8 +16,7 @@ const DRAWINGS: Readonly<Record<SetKind, Drawing>> = {
   },
   phonograph: {
     body: 'M8 26h20v8H8z',
-    lines:
-      'M8 26h20v8H8zM6 34h24M10 26v-2h16v2M18 24v-4M18 20c4 0 6-2 7-6M22 15l12-9v14l-10-3M28 30h4v-3',
+    lines: 'M8 26h20v8H8zM6 34h24M10 26v-2h16v2M18 24v-4M18 20c4 0 6-2 7-6M22 15l12-9v14l-10-3M28 30h4v-3',
   },
   combination: {
     body: 'M9 7h22v26H9z',

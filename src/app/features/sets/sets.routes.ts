@@ -1,6 +1,6 @@
 import type { Routes } from '@angular/router';
 import { allowed } from '../../core/guards';
-import { keepUnsaved } from './keep-unsaved';
+import { keepUnsaved } from '../../core/unsaved';
 
 export const SETS_ROUTES: Routes = [
   { path: '', title: 'Sets', loadComponent: () => import('./sets-list-page').then((m) => m.SetsListPage) },
