@@ -18,6 +18,8 @@ const CELL_STYLES: Readonly<Record<Row['style'], TextStyle>> = {
 const HEAD_HEIGHT = STYLES.tableHead.leading + 2;
 /** A table that takes at most this share of a page stays on one. */
 const SHORT = 0.35;
+/** A cell narrower than this stays on one line. */
+const FEW_WORDS = 76;
 /** How much a long column asks for at most, so that it leaves room for others. */
 const MOST_ASKED = 420;
 
@@ -64,7 +66,7 @@ export function drawTable(sheet: Sheet, table: Table): void {
 
 /**
  * Where the columns stand. The right-aligned ones all get what the widest of them asks; the others get their longest
- * word and share what is left by how much more they ask.
+ * word or a few words, and share what is left by how much more they ask.
  */
 function placeColumns(sheet: Sheet, table: Table): Pick<Cell, 'x' | 'width' | 'align'>[] {
   const columns = table.columns.map(({ label, align }, i) => {
@@ -72,7 +74,7 @@ function placeColumns(sheet: Sheet, table: Table): Pick<Cell, 'x' | 'width' | 'a
     const all = [{ text: label, style: STYLES.tableHead }, ...texts];
     const widest = Math.max(...all.map(({ text, style }) => widthOf(sheet, text, style)));
     const words = all.flatMap(({ text, style }) => text.split(/\s+/).map((word) => widthOf(sheet, word, style)));
-    const least = Math.min(Math.max(...words) + SLACK, sheet.width / table.columns.length);
+    const least = Math.min(Math.max(...words, Math.min(widest, FEW_WORDS)) + SLACK, sheet.width / table.columns.length);
     return { align, least, asked: Math.max(least, Math.min(MOST_ASKED, widest + SLACK)) };
   });
   const sum = (widths: readonly number[]) => widths.reduce((total, width) => total + width, 0);
