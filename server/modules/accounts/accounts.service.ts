@@ -81,7 +81,7 @@ export function createAccountsService(deps: {
 
     /** The person whose address and password these are, or null; never says which of the two was wrong. */
     async checkPassword(email: string, password: string): Promise<Actor | null> {
-      const row = repo.byEmail(email);
+      const row = repo.byEmail(email.trim().toLowerCase());
       const matches = await verify(mayEnter(row) ? row.passwordHash : await nobodysHash, password);
       return matches && mayEnter(row) ? actorOf(row) : null;
     },
