@@ -43,7 +43,7 @@ function contentSecurityPolicy(nonce: string): string {
     "font-src 'self'",
     "connect-src 'self'",
     "object-src 'none'",
-    "base-uri 'none'",
+    "base-uri 'self'",
     "form-action 'self'",
     "frame-ancestors 'none'",
   ].join('; ');
