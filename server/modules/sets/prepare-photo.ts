@@ -27,11 +27,7 @@ export async function preparePhoto(bytes: Buffer, fileName: string): Promise<Pre
       detail: `«${fileName.slice(0, 80)}» ${why} Use a JPEG, PNG, WebP, TIFF or HEIF photograph of up to 25 MB.`,
     });
   const open = () => sharp(bytes, { limitInputPixels: MOST_PIXELS, failOn: 'error' });
-  const { format, width, height } = await open()
-    .metadata()
-    .catch(() => {
-      throw refuse('is not a picture that can be read.');
-    });
+  const { format, width, height } = await describe();
   if (!FORMATS.has(format)) throw refuse(`is a ${format} file.`);
   if (Math.min(width, height) < LEAST) throw refuse(`is only ${width} × ${height} pixels.`);
   if (width * height > MOST_PIXELS)
@@ -47,5 +43,13 @@ export async function preparePhoto(bytes: Buffer, fileName: string): Promise<Pre
     return { large: large.data, small, width: large.info.width, height: large.info.height };
   } catch {
     throw refuse('is damaged: its picture ends early or cannot be decoded.');
+  }
+
+  async function describe() {
+    try {
+      return await open().metadata();
+    } catch {
+      throw refuse('is not a picture that can be read.');
+    }
   }
 }
