@@ -1,5 +1,4 @@
 import { ChangeDetectionStrategy, Component, computed, input, signal } from '@angular/core';
-import { MatButton } from '@angular/material/button';
 import type { SeriesSummary } from '../../../contracts/series';
 import { formatPeriod } from '../../../domain/calendar/period';
 import { formatMoney } from '../../../domain/money/money';
@@ -17,7 +16,7 @@ import {
 /** The restated amount with both of its bands, the multiplier, the yearly rise and what money buys. */
 @Component({
   selector: 'tw-restated-figures',
-  imports: [Figure, MatButton],
+  imports: [Figure],
   templateUrl: './restated-figures.html',
   styleUrl: './restated-figures.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
