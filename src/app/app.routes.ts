@@ -1,5 +1,5 @@
 import type { Routes } from '@angular/router';
-import { allowed, setUpFirst, signedIn } from './core/guards';
+import { allowed, notYetSetUp, setUpFirst, signedIn, signedOut } from './core/guards';
 
 export const APP_ROUTES: Routes = [
   {
@@ -44,11 +44,13 @@ export const APP_ROUTES: Routes = [
       },
       {
         path: 'sign-in',
+        canActivate: [signedOut],
         title: 'Sign in',
         loadComponent: () => import('./features/account/sign-in-page').then((m) => m.SignInPage),
       },
       {
         path: 'set-up',
+        canActivate: [notYetSetUp],
         title: 'Set up the practice',
         loadComponent: () => import('./features/account/set-up-page').then((m) => m.SetUpPage),
       },

@@ -1,6 +1,7 @@
 import { inject } from '@angular/core';
 import { Router, type CanActivateFn } from '@angular/router';
 import type { Action } from '../../domain/access/policy';
+import { HOME } from './navigation';
 import { SessionStore } from './session';
 
 /** Only for people signed in; others go to sign in and come back. */
@@ -23,3 +24,11 @@ export const setUpFirst: CanActivateFn = (_route, state) =>
   state.url.startsWith('/set-up') ||
   state.url.startsWith('/then-and-now') ||
   inject(Router).createUrlTree(['/set-up']);
+
+/** Signing in is for those who are not. */
+export const signedOut: CanActivateFn = () =>
+  inject(SessionStore).user() === null || inject(Router).createUrlTree([HOME]);
+
+/** Once there is an administrator, setting up is over. */
+export const notYetSetUp: CanActivateFn = () =>
+  inject(SessionStore).session()?.needsSetup === true || inject(Router).createUrlTree(['/sign-in']);

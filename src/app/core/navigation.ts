@@ -16,3 +16,6 @@ export const PLACES: readonly Place[] = [
   { path: '/practice', label: 'Practice', icon: 'storefront', action: 'practice.edit' },
   { path: '/then-and-now', label: 'Then and now', icon: 'straighten', action: null },
 ];
+
+/** Where a person starts after signing in. */
+export const HOME = '/sets';
