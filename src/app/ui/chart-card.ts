@@ -5,7 +5,7 @@ let cards = 0;
 
 /**
  * A chart with its table twin: project the drawing with the attribute `chart`, the table with `table`, further
- * switches with `actions`. The sentence says what the chart shows.
+ * switches with `actions`, a verdict under both with none of these. The sentence says what the chart shows.
  */
 @Component({
   selector: 'tw-chart-card',

@@ -54,4 +54,4 @@ export class SetFigures {
 const shownWorth = (worth: Worth | undefined) =>
   worth === undefined
     ? null
-    : { amount: wholeText(worth.amount), range: rangeText(worth), words: worth.basis, basis: worthBasis(worth) };
+    : { amount: wholeText(worth.amount), range: rangeText(worth), basis: `${worthBasis(worth)}. ${worth.basis}` };

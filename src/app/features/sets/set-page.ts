@@ -1,9 +1,8 @@
 import { ChangeDetectionStrategy, Component, computed, effect, inject, signal } from '@angular/core';
 import { toSignal } from '@angular/core/rxjs-interop';
-import { MatButton } from '@angular/material/button';
+import { MatButton, MatIconButton } from '@angular/material/button';
 import { MatIcon } from '@angular/material/icon';
 import { MatMenuModule } from '@angular/material/menu';
-import { MatTabsModule } from '@angular/material/tabs';
 import { ActivatedRoute, NavigationEnd, Router, RouterLink, RouterLinkActive, RouterOutlet } from '@angular/router';
 import { filter, map } from 'rxjs';
 import { getAppraisalSheetPdf, getRestorationEstimatePdf } from '../../../contracts/papers';
@@ -16,7 +15,7 @@ import { Notice } from '../../ui/notice';
 import { SkeletonRows } from '../../ui/skeleton-rows';
 import { StatusChip } from '../../ui/status-chip';
 import { SetStore } from './set-store';
-import { setName } from './set-words';
+import { inALine, setName } from './set-words';
 
 const PAPER_NAMES = { letter: 'Letter', a4: 'A4' } as const;
 
@@ -27,8 +26,8 @@ const PAPER_NAMES = { letter: 'Letter', a4: 'A4' } as const;
     Failed,
     MatButton,
     MatIcon,
+    MatIconButton,
     MatMenuModule,
-    MatTabsModule,
     Notice,
     RouterLink,
     RouterLinkActive,
@@ -54,6 +53,7 @@ export class SetPage {
   protected readonly busy = signal(false);
   protected readonly trouble = signal('');
   protected readonly setName = setName;
+  protected readonly inALine = inALine;
   protected readonly files = computed(() => {
     const estimate = this.store.newest();
     const sheet = addressOf(getAppraisalSheetPdf, { id: this.id() });

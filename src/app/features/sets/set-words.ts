@@ -30,3 +30,13 @@ export const worthBasis = ({ valueType, saidBy, effectiveOn }: Worth): string =>
   `${VALUE_TYPE_LABELS[valueType]}, ${saidBy}, ${formatDate(effectiveOn)}`;
 
 export const setName = ({ maker, model }: Pick<SetDetail, 'maker' | 'model'>): string => `${maker} ${model}`;
+
+/** `1941, eleven tubes, AM and two short-wave bands`: the year, and the description going on in small letters. */
+export function inALine({ year, description }: Pick<SetDetail, 'year' | 'description'>): string {
+  if (year === null) return description;
+  if (description === '') return String(year);
+  const goesOn = /^[A-Z][a-z]/.test(description)
+    ? description.charAt(0).toLowerCase() + description.slice(1)
+    : description;
+  return `${year}, ${goesOn}`;
+}
