@@ -1,4 +1,4 @@
-import { Component } from '@angular/core';
+import { ChangeDetectionStrategy, Component } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { ChartCard } from './chart-card';
 
@@ -8,6 +8,7 @@ import { ChartCard } from './chart-card';
     <div chart class="drawn"></div>
     <table table></table>
   </tw-chart-card>`,
+  changeDetection: ChangeDetectionStrategy.OnPush,
 })
 class Host {}
 

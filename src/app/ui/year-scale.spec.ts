@@ -1,4 +1,4 @@
-import { Component, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, signal } from '@angular/core';
 import { TestBed, type ComponentFixture } from '@angular/core/testing';
 import type { Period } from '../../domain/calendar/period';
 import type { YearScaleContent } from '../../domain/year-scale/content';
@@ -27,6 +27,7 @@ const content = (from: string, to: string): YearScaleContent => ({
     (thenChange)="set('from', $event)"
     (nowChange)="set('to', $event)"
   />`,
+  changeDetection: ChangeDetectionStrategy.OnPush,
 })
 class Host {
   readonly content = signal(content('1941', '2026-07'));
