@@ -27,6 +27,9 @@ export const APP_CONFIG: ApplicationConfig = {
         .pipe(catchError(() => of(null)));
     }),
     { provide: TitleStrategy, useExisting: PageTitle },
-    { provide: MAT_FORM_FIELD_DEFAULT_OPTIONS, useValue: { appearance: 'outline', floatLabel: 'always' } },
+    {
+      provide: MAT_FORM_FIELD_DEFAULT_OPTIONS,
+      useValue: { appearance: 'outline', floatLabel: 'always', subscriptSizing: 'dynamic' },
+    },
   ],
 };

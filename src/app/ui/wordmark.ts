@@ -4,7 +4,7 @@ import { ChangeDetectionStrategy, Component, input } from '@angular/core';
 @Component({
   selector: 'tw-wordmark',
   template: `
-    <svg width="122" height="30" viewBox="0 0 122 30" role="img" aria-label="Thenworth" [class.on-glass]="onGlass()">
+    <svg width="132" height="30" viewBox="0 0 132 30" role="img" aria-label="Thenworth" [class.on-glass]="onGlass()">
       <text class="then" x="50" y="22" text-anchor="end">then</text>
       <path class="needle" d="M54 2v26" />
       <text class="worth" x="58" y="22">worth</text>

@@ -80,7 +80,7 @@ export function drawCostAgainstWorth(
   const costY = worthY + bar + (narrow ? 3.4 : 3.2) * em;
   const axisY = costY + bar + 2.4 * em;
 
-  const axis = moneyAxis(Math.max(asFound, asRestored, restoredHigh ?? 0, asFound + cost.high), narrow ? 3 : 4);
+  const axis = moneyAxis(Math.max(asFound, asRestored, restoredHigh ?? 0, asFound + cost.high), narrow ? 3 : 5);
   const x = (amount: number) => round(left + ((right - left) * amount) / axis.end);
   const span = (from: number, to: number, y: number, height = bar): Bar => ({
     x: x(Math.min(from, to)),
