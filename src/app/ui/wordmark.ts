@@ -12,7 +12,11 @@ import { ChangeDetectionStrategy, Component, input } from '@angular/core';
   `,
   styles: `
     :host {
-      display: inline-flex;
+      display: inline-block;
+      width: var(--tw-wordmark-width, 122px);
+    }
+    svg {
+      width: 100%;
     }
     text {
       font-family: Lato, sans-serif;

@@ -9,7 +9,6 @@ import {
   signal,
   untracked,
 } from '@angular/core';
-import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import { FormControl, NonNullableFormBuilder, ReactiveFormsModule } from '@angular/forms';
 import { MatAutocompleteModule, type MatAutocompleteSelectedEvent } from '@angular/material/autocomplete';
 import { MatButton } from '@angular/material/button';
@@ -44,6 +43,7 @@ export class OwnerField {
 
   private readonly fb = inject(NonNullableFormBuilder);
   protected readonly text = this.fb.control('');
+  /** As typed by hand; the field itself also takes the value of a chosen option. */
   private readonly typed = signal('');
   protected readonly adding = signal(false);
   protected readonly fieldError = fieldError;
@@ -59,7 +59,6 @@ export class OwnerField {
   });
 
   constructor() {
-    this.text.valueChanges.pipe(takeUntilDestroyed()).subscribe((text) => this.typed.set(text));
     effect((onCleanup) => {
       const control = this.control();
       // Names the owner once the list has come, unless somebody types already.
@@ -67,6 +66,10 @@ export class OwnerField {
       const watch = control.valueChanges.subscribe(() => this.showChosen());
       onCleanup(() => watch.unsubscribe());
     });
+  }
+
+  protected type(event: Event): void {
+    this.typed.set((event.target as HTMLInputElement).value);
   }
 
   protected choose({ option }: MatAutocompleteSelectedEvent): void {
@@ -88,7 +91,9 @@ export class OwnerField {
   }
 
   protected startAdding(): void {
-    this.fresh.reset({ name: this.typed().trim() === this.chosenName() ? '' : this.typed().trim() });
+    this.refuse(false);
+    this.text.setValue(this.typed());
+    this.fresh.reset({ name: this.typed().trim() });
     this.adding.set(true);
   }
 
@@ -128,6 +133,7 @@ export class OwnerField {
   }
 
   private showChosen(): void {
+    this.typed.set('');
     this.text.setValue(this.chosenName());
     // What the server says against the owner is said at the field.
     this.text.setErrors(this.control().errors);

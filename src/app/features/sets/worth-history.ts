@@ -32,14 +32,14 @@ import { StatusChip } from '../../ui/status-chip';
                   <tw-status-chip tone="done" icon="check" text="In force" />
                 }
               </th>
-              <td class="tw-num strong">{{ row.amount }}</td>
-              <td class="tw-num">{{ row.range }}</td>
-              <td>{{ row.type }}</td>
-              <td class="nowrap">{{ row.effective }}</td>
-              <td class="basis">
+              <td class="tw-num strong" data-label="Amount">{{ row.amount }}</td>
+              <td class="tw-num" data-label="Range">{{ row.range }}</td>
+              <td data-label="Type of value">{{ row.type }}</td>
+              <td class="nowrap" data-label="Effective">{{ row.effective }}</td>
+              <td class="basis" data-label="Who says so">
                 {{ row.saidBy }}<span class="tw-mute">{{ row.basis }}</span>
               </td>
-              <td class="tw-mute">{{ row.recorded }}</td>
+              <td class="tw-mute" data-label="Recorded">{{ row.recorded }}</td>
             </tr>
           }
         </tbody>
@@ -79,6 +79,29 @@ import { StatusChip } from '../../ui/status-chip';
     }
     .basis span {
       display: block;
+    }
+    @media (max-width: 839px) {
+      thead {
+        display: none;
+      }
+      tr {
+        display: block;
+        padding: 6px 0;
+        border-bottom: 1px solid var(--mat-sys-outline-variant);
+      }
+      tbody th,
+      td {
+        display: block;
+        padding: 3px 0;
+        border: 0;
+        text-align: left;
+        white-space: normal;
+      }
+      td::before {
+        content: attr(data-label) ': ';
+        color: var(--mat-sys-on-surface-variant);
+        font-weight: 400;
+      }
     }
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,
