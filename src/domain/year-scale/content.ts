@@ -40,9 +40,14 @@ export function yearScaleInput(content: YearScaleContent, size: YearScaleInput['
           multipliers: content.multipliers.map(({ period, multiplier }) => ({ year: yearOf(period), multiplier })),
         }),
     formatAmount: (amount) =>
-      formatMoney(String(amount), currency, { whole: Number.isInteger(amount) || amount >= WHOLE_FROM }),
+      formatMoney(String(amount), currency, {
+        whole: amount >= WHOLE_FROM || (Number.isInteger(amount) && restated >= CENTS_BELOW),
+      }),
   };
 }
 
 /** From this amount on, cents say more than an index of one decimal supports. */
 const WHOLE_FROM = 100;
+
+/** Below this amount the axis counts in cents. */
+const CENTS_BELOW = 5;

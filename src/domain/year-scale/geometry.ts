@@ -106,7 +106,8 @@ function takenBy(input: YearScaleInput, axis: YearAxis, measures: Measures, feet
   const taken: Stretch[] = [];
   for (const who of ['then', 'now'] as const) {
     const x = axis.xOf(input[who].period);
-    taken.push({ from: x - 4, to: x + 4 });
+    // wide enough for the multiplier under the numeral too
+    taken.push({ from: x - 8, to: x + 8 });
     const year = feet.years[who];
     if (!year) continue;
     const half = textWidth(year.text, year.size) / 2 + 8;

@@ -38,7 +38,7 @@ export class RestatedFigures {
       exact: formatMoney(shown.restated, currency),
       rounding: same ? null : formatBand(shown, shown.rounding),
       within: same ? 'Nothing left open' : withinYear ? formatBand(shown, withinYear) : 'Dated to the month',
-      withinLabel: `Any month of ${from.period.slice(0, 4)}`,
+      withinLabel: withinYear ? `Any month of ${from.period}` : 'Within the year',
       withinBasis: same
         ? 'Both periods are the same'
         : withinYear
