@@ -1,5 +1,6 @@
 import Sqlite from 'better-sqlite3';
 import { drizzle, type BetterSQLite3Database } from 'drizzle-orm/better-sqlite3';
+import { foldText } from '../../src/domain/text/fold';
 import * as schema from './schema';
 
 export type Schema = typeof schema;
@@ -22,5 +23,7 @@ export function openDatabase(file: string): OpenDatabase {
   sqlite.pragma('synchronous = FULL');
   sqlite.pragma('foreign_keys = ON');
   sqlite.pragma('busy_timeout = 5000');
+  // SQLite's own lower() knows only the letters A to Z
+  sqlite.function('fold', { deterministic: true }, (text) => (typeof text === 'string' ? foldText(text) : ''));
   return { db: drizzle(sqlite, { schema }), sqlite, close: () => sqlite.close() };
 }

@@ -29,7 +29,10 @@ export function sendProblem(res: Response, code: ProblemCode, extra: Extra = {})
     .send(JSON.stringify({ ...body, requestId: requestIdOf(res) }));
 }
 
-const requestIdOf = (res: Response): string => String((res.req as { id?: unknown }).id ?? '');
+function requestIdOf(res: Response): string {
+  const { id } = res.req as { id?: unknown };
+  return typeof id === 'string' ? id : '';
+}
 
 /** Each issue of a failed parse as a field, with what was sent there. */
 export function fieldProblems(error: ZodError, input: unknown): FieldProblem[] {

@@ -1,6 +1,6 @@
 import * as z from 'zod';
 import { ROLES } from '../domain/access/policy';
-import { LINE_KINDS, STAGES, TAX_TREATMENTS } from '../domain/estimate/terms';
+import { STAGES, TAX_TREATMENTS } from '../domain/estimate/terms';
 import {
   amount,
   hours,

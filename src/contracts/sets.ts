@@ -227,7 +227,8 @@ export const recordCondition = contract({
         }),
       )
       .min(1, 'Grade at least one part.')
-      .max(SET_PARTS.length),
+      .max(SET_PARTS.length)
+      .refine((all) => new Set(all.map((e) => e.part)).size === all.length, 'Grade each part once.'),
   }),
   reply: setDetail,
   status: 201,
@@ -263,7 +264,7 @@ export const recordWorth = contract({
   status: 201,
 });
 
-/** Multipart, field `photo`: a JPEG, PNG, WebP, TIFF or HEIF file of at most 25 MB, told by its bytes. */
+/** Multipart, field `photo`: a JPEG, PNG, WebP, TIFF or AVIF file of at most 25 MB, told by its bytes. */
 export const addPhoto = contract({
   method: 'POST',
   path: '/api/sets/:id/photos',

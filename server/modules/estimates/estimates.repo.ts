@@ -2,6 +2,7 @@ import { and, asc, desc, eq, inArray, like, max, or, sql, type SQL } from 'drizz
 import type { Action, Role } from '../../../src/domain/access/policy';
 import { STAGES } from '../../../src/domain/estimate/terms';
 import { idInNumber } from '../../../src/domain/sets/numbers';
+import { foldText } from '../../../src/domain/text/fold';
 import type { Authorized } from '../../db/authorized';
 import type { Database } from '../../db/client';
 import { estimateLines, estimates, owners, sets, users } from '../../db/schema';
@@ -203,12 +204,11 @@ export function createEstimatesRepo(db: Database) {
 const reach = (auth: Seeing): SQL | undefined =>
   auth.scope === 'all' ? undefined : eq(owners.userId, auth.actor.userId);
 
-const SEARCHED = sql`lower(${estimates.title} || ' ' || ${sets.maker} || ' ' || ${sets.model} || ' ' || coalesce(${owners.name}, ''))`;
+const SEARCHED = sql`fold(${estimates.title} || ' ' || ${sets.maker} || ' ' || ${sets.model} || ' ' || coalesce(${owners.name}, ''))`;
 
 function filters({ q, setId, state }: EstimateFilter): (SQL | undefined)[] {
   const id = idInNumber('E', q);
-  const words = q
-    .toLowerCase()
+  const words = foldText(q)
     .split(/\s+/)
     .filter((word) => word !== '');
   const byWords = and(

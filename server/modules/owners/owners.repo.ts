@@ -14,7 +14,7 @@ export function createOwnersRepo(db: Database) {
         .from(owners)
         .leftJoin(sets, eq(sets.ownerId, owners.id))
         .groupBy(owners.id)
-        .orderBy(asc(sql`lower(${owners.name})`), asc(owners.id))
+        .orderBy(asc(sql`fold(${owners.name})`), asc(owners.id))
         .all()
         .map(({ owner, setCount }) => ({ ...owner, setCount })),
 

@@ -1,6 +1,6 @@
 import type { Owner } from '../../../src/contracts/owners';
 import type { Authorized } from '../../db/authorized';
-import type { OwnersRepo } from './owners.repo';
+import type { OwnerRow, OwnersRepo } from './owners.repo';
 
 export type OwnersService = ReturnType<typeof createOwnersService>;
 
@@ -13,7 +13,7 @@ export function createOwnersService(deps: {
   const { repo, now, findCollectorByEmail } = deps;
   return {
     list(auth: Authorized<'owner.list'>): { items: Owner[]; total: number } {
-      const items = repo.list(auth).map(({ createdAt: _, ...owner }) => owner);
+      const items = repo.list(auth).map((row) => ({ ...shown(row), setCount: row.setCount }));
       return { items, total: items.length };
     },
 
@@ -22,10 +22,11 @@ export function createOwnersService(deps: {
       input: { readonly name: string; readonly email: string; readonly phone: string },
     ): Owner {
       const userId = input.email === '' ? null : findCollectorByEmail(input.email);
-      const { createdAt: _, ...owner } = repo.insert(auth, { ...input, userId, createdAt: now() });
-      return { ...owner, setCount: 0 };
+      return { ...shown(repo.insert(auth, { ...input, userId, createdAt: now() })), setCount: 0 };
     },
 
     linkUser: (email: string, userId: number): void => repo.linkUser(email, userId),
   };
 }
+
+const shown = ({ id, name, email, phone, userId }: OwnerRow) => ({ id, name, email, phone, userId });

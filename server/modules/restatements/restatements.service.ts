@@ -66,7 +66,7 @@ export function createRestatementsService({ referenceData }: { readonly referenc
 
     /** A set's price when new in the newest published month's money, or why that is unknown. Never throws for data. */
     restatePrice(price: DatedPrice): RestatedPrice {
-      const result = overTime(referenceData, price);
+      const result = inNewestMoney(referenceData, price);
       if (!result.ok) return { known: false, reason: result.error.reason, neighbours: [...result.error.neighbours] };
       const { series, release, from, to, factor, restated, bands, basis } = replyOf(
         result.value.series,
@@ -80,16 +80,23 @@ export function createRestatementsService({ referenceData }: { readonly referenc
   };
 }
 
-function overTime(referenceData: ReferenceData, price: DatedPrice): Result<RestatedOverTime, NotRestated> {
+function inNewestMoney(
+  referenceData: ReferenceData,
+  price: DatedPrice,
+): Result<Omit<RestatedOverTime, 'curve'>, NotRestated> {
   const series = referenceData.seriesByCurrency(price.currency);
   if (series === undefined) return fail({ reason: `No price index for ${price.currency} is kept.`, neighbours: [] });
   const amount = expectOk(parsePlainDecimal(price.amount));
-  const from = price.period;
-  const restatement = restate({ series, amount, from, to: newestPeriod(series) });
-  if (!restatement.ok) return fail(notRestated(restatement.error));
-  const curve = restatedCurve(series, amount, from);
-  if (!curve.ok) return fail(notRestated(curve.error));
-  return ok({ series, restatement: restatement.value, curve: curve.value });
+  const restatement = restate({ series, amount, from: price.period, to: newestPeriod(series) });
+  return restatement.ok ? ok({ series, restatement: restatement.value }) : fail(notRestated(restatement.error));
+}
+
+function overTime(referenceData: ReferenceData, price: DatedPrice): Result<RestatedOverTime, NotRestated> {
+  const newest = inNewestMoney(referenceData, price);
+  if (!newest.ok) return newest;
+  const { series, restatement } = newest.value;
+  const curve = restatedCurve(series, expectOk(parsePlainDecimal(price.amount)), price.period);
+  return curve.ok ? ok({ series, restatement, curve: curve.value }) : fail(notRestated(curve.error));
 }
 
 const notRestated = (failure: PeriodNotPublished): NotRestated => ({

@@ -3,6 +3,7 @@ import type { InputOf } from '../../../src/contracts/contract';
 import type { listSets } from '../../../src/contracts/sets';
 import type { Action } from '../../../src/domain/access/policy';
 import { idInNumber } from '../../../src/domain/sets/numbers';
+import { foldText } from '../../../src/domain/text/fold';
 import type { Authorized } from '../../db/authorized';
 import { owners, sets } from '../../db/schema';
 
@@ -23,14 +24,14 @@ export function filters({ q, kind, maker, ownerId, state }: SetsQuery): SQL | un
   );
 }
 
-const SEARCHED = sql`lower(${sets.maker} || ' ' || ${sets.model} || ' ' || ${sets.description} || ' ' || ${sets.serial} || ' ' || ${sets.chassis} || ' ' || coalesce(${sets.year}, '') || ' ' || coalesce(${owners.name}, ''))`;
+/** `fold` is defined on the connection: small letters, no marks. */
+const SEARCHED = sql`fold(printf('S-%04d ', ${sets.id}) || ${sets.maker} || ' ' || ${sets.model} || ' ' || ${sets.description} || ' ' || ${sets.serial} || ' ' || ${sets.chassis} || ' ' || coalesce(${sets.year}, '') || ' ' || coalesce(${owners.name}, ''))`;
 
-/** Every word must occur somewhere; a set's number finds that set. */
+/** Every word must occur somewhere; a set's number alone, with or without its zeros, finds that set. */
 export function searchWords(text: string): SQL[] {
   const id = idInNumber('S', text);
   if (id !== null && /^s/i.test(text.trim())) return [eq(sets.id, id)];
-  return text
-    .toLowerCase()
+  return foldText(text)
     .split(/\s+/)
     .filter((word) => word !== '')
     .map((word) => sql`${like(SEARCHED, `%${word.replace(/[\\%_]/g, '\\$&')}%`)} escape '\\'`);
@@ -43,7 +44,7 @@ export function ordering(sort: SetsQuery['sort']): SQL[] {
     case 'number':
       return [asc(sets.id)];
     case 'maker':
-      return [asc(sql`lower(${sets.maker})`), asc(sql`lower(${sets.model})`), asc(sets.id)];
+      return [asc(sql`fold(${sets.maker})`), asc(sql`fold(${sets.model})`), asc(sets.id)];
     case 'year':
       return [sql`${sets.year} is null`, asc(sets.year), asc(sets.id)];
     case '-year':

@@ -1,4 +1,4 @@
-import { and, asc, count, desc, eq, inArray, isNotNull, sql } from 'drizzle-orm';
+import { and, asc, count, desc, eq, inArray, isNotNull, max, sql } from 'drizzle-orm';
 import type { Action } from '../../../src/domain/access/policy';
 import type { Authorized } from '../../db/authorized';
 import type { Database } from '../../db/client';
@@ -10,6 +10,8 @@ export type SetValues = Omit<typeof sets.$inferInsert, 'id' | 'version' | 'creat
 export type HazardValues = Pick<typeof setHazards.$inferSelect, 'hazard' | 'volts' | 'note'>;
 export type WorthRow = typeof setWorths.$inferSelect;
 export type ConditionRow = typeof setConditions.$inferSelect;
+export type NewCondition = Omit<typeof setConditions.$inferInsert, 'id' | 'setId' | 'recordedAt'>;
+export type NewWorth = Omit<typeof setWorths.$inferInsert, 'id' | 'setId' | 'recordedAt'>;
 export type SetsRepo = ReturnType<typeof createSetsRepo>;
 export type OwnedSet = SetRow & { readonly ownerName: string | null };
 
@@ -18,16 +20,20 @@ type Seeing = Authorized<Action>;
 type Editing = Authorized<'set.edit'>;
 
 export function createSetsRepo(db: Database) {
-  const owned = (auth: Seeing) =>
+  const owned = () =>
     db
       .select({ set: sets, ownerName: owners.name })
       .from(sets)
       .leftJoin(owners, eq(sets.ownerId, owners.id))
       .$dynamic();
 
+  /** Every change within a set shows in the date of its last change. */
+  const touch = (tx: Pick<Database, 'update'>, id: number, now: number): void =>
+    void tx.update(sets).set({ updatedAt: now }).where(eq(sets.id, id)).run();
+
   return {
     find(auth: Seeing, id: number): OwnedSet | undefined {
-      const row = owned(auth)
+      const row = owned()
         .where(and(eq(sets.id, id), reach(auth)))
         .get();
       return row && { ...row.set, ownerName: row.ownerName };
@@ -41,7 +47,7 @@ export function createSetsRepo(db: Database) {
         .leftJoin(owners, eq(sets.ownerId, owners.id))
         .where(where)
         .get();
-      const rows = owned(auth)
+      const rows = owned()
         .where(where)
         .orderBy(...ordering(query.sort))
         .limit(query.pageSize)
@@ -144,22 +150,36 @@ export function createSetsRepo(db: Database) {
     setArchived: (_auth: Editing, id: number, archived: boolean, now: number): void =>
       void db.update(sets).set({ archived, updatedAt: now }).where(eq(sets.id, id)).run(),
 
-    touch: (_auth: Authorized<'set.edit' | 'worth.record'>, id: number, now: number): void =>
-      void db.update(sets).set({ updatedAt: now }).where(eq(sets.id, id)).run(),
+    insertConditions: (_auth: Editing, setId: number, rows: readonly NewCondition[], now: number): void =>
+      db.transaction(
+        (tx) => {
+          tx.insert(setConditions)
+            .values(rows.map((row) => ({ ...row, setId, recordedAt: now })))
+            .run();
+          touch(tx, setId, now);
+        },
+        { behavior: 'immediate' },
+      ),
 
-    insertConditions: (_auth: Editing, rows: readonly (typeof setConditions.$inferInsert)[]): void =>
-      void db
-        .insert(setConditions)
-        .values([...rows])
-        .run(),
+    insertWorth: (_auth: Authorized<'worth.record'>, setId: number, row: NewWorth, now: number): void =>
+      db.transaction(
+        (tx) => {
+          tx.insert(setWorths)
+            .values({ ...row, setId, recordedAt: now })
+            .run();
+          touch(tx, setId, now);
+        },
+        { behavior: 'immediate' },
+      ),
 
-    insertWorth: (_auth: Authorized<'worth.record'>, row: typeof setWorths.$inferInsert): void =>
-      void db.insert(setWorths).values(row).run(),
-
-    /** Prices of models that the practice shows to anyone; neither owner nor serial is read. */
+    /**
+     * Prices of models that the practice shows to anyone, each model and period once; neither owner nor serial is
+     * read. With max() SQLite takes the other columns of the row that has it: the set changed last.
+     */
     publicPrices: () =>
       db
-        .selectDistinct({
+        .select({
+          changed: max(sets.updatedAt),
           kind: sets.kind,
           maker: sets.maker,
           model: sets.model,
@@ -170,6 +190,7 @@ export function createSetsRepo(db: Database) {
         })
         .from(sets)
         .where(and(eq(sets.priceIsPublic, true), eq(sets.archived, false), isNotNull(sets.priceCents)))
+        .groupBy(sets.maker, sets.model, sets.pricePeriod)
         .orderBy(asc(sets.pricePeriod), asc(sets.maker), asc(sets.model))
         .all(),
   };

@@ -4,26 +4,34 @@ import type {
   Photo,
   recordCondition,
   recordWorth,
-  registerSet,
   SetDetail,
   SetSummary,
   Worth,
 } from '../../../src/contracts/sets';
-import { parsePeriod, type Period } from '../../../src/domain/calendar/period';
-import { cents, centsToDecimal, toCents } from '../../../src/domain/money/money';
-import { expectOk } from '../../../src/domain/result';
+import { toCents } from '../../../src/domain/money/money';
 import { formatNumber } from '../../../src/domain/sets/numbers';
 import type { Action } from '../../../src/domain/access/policy';
 import type { Authorized } from '../../db/authorized';
 import { fieldError, ProblemError } from '../../http/problem';
 import type { RestatementsService } from '../restatements/restatements.service';
-import type { PhotoRow, PhotosRepo } from './photos.repo';
+import type { PhotosRepo } from './photos.repo';
 import { preparePhoto } from './prepare-photo';
-import type { OwnedSet, SetsRepo, SetValues, WorthRow } from './sets.repo';
+import {
+  identityOf,
+  moneyOf,
+  photoAddress,
+  priceOf,
+  shownPhoto,
+  shownWorth,
+  valuesOf,
+  type SetInput,
+} from './set-rows';
+import type { OwnedSet, SetsRepo, WorthRow } from './sets.repo';
 
 export type SetsService = ReturnType<typeof createSetsService>;
-type SetInput = InputOf<typeof registerSet>['body'];
 type Editing = Authorized<'set.edit'>;
+/** As many as one ordering may name. */
+const MOST_PHOTOS = 200;
 
 export function createSetsService(deps: {
   readonly repo: SetsRepo;
@@ -119,28 +127,22 @@ export function createSetsService(deps: {
     ): SetDetail {
       required(auth, id);
       refuseFuture('notedOn', notedOn, now());
-      const who = { setId: id, notedOn, recordedBy: auth.actor.userId, recordedAt: now() };
-      repo.insertConditions(
-        auth,
-        entries.map((entry) => ({ ...entry, ...who })),
-      );
-      repo.touch(auth, id, now());
+      const rows = entries.map((entry) => ({ ...entry, notedOn, recordedBy: auth.actor.userId }));
+      repo.insertConditions(auth, id, rows, now());
       return detail(auth, id);
     },
 
     recordWorth(auth: Authorized<'worth.record'>, id: number, input: InputOf<typeof recordWorth>['body']): SetDetail {
       required(auth, id);
       const { amount, low, high, ...same } = input;
-      repo.insertWorth(auth, {
+      const row = {
         ...same,
-        setId: id,
         amountCents: toCents(amount),
         lowCents: low === null ? null : toCents(low),
         highCents: high === null ? null : toCents(high),
         recordedBy: auth.actor.userId,
-        recordedAt: now(),
-      });
-      repo.touch(auth, id, now());
+      };
+      repo.insertWorth(auth, id, row, now());
       return detail(auth, id);
     },
 
@@ -150,6 +152,8 @@ export function createSetsService(deps: {
       file: { readonly bytes: Buffer; readonly name: string; readonly caption?: string },
     ): Promise<Photo> {
       required(auth, id);
+      if (photos.of(id).length >= MOST_PHOTOS)
+        throw fieldError('photo', `A set has room for ${MOST_PHOTOS} photographs. Remove one first.`);
       const prepared = await preparePhoto(file.bytes, file.name);
       required(auth, id); // it may have gone while the picture was prepared
       const row = photos.append(auth, {
@@ -159,26 +163,24 @@ export function createSetsService(deps: {
         addedBy: auth.actor.userId,
         addedAt: now(),
       });
-      repo.touch(auth, id, now());
       return shownPhoto(row);
     },
 
     captionPhoto(auth: Editing, id: number, photoId: number, caption: string): Photo {
       required(auth, id);
-      const row = photos.caption(auth, id, photoId, caption);
+      const row = photos.caption(auth, { setId: id, photoId }, caption, now());
       if (row === undefined) throw new ProblemError('not-found');
       return shownPhoto(row);
     },
 
     removePhoto(auth: Editing, id: number, photoId: number): void {
       required(auth, id);
-      if (!photos.remove(auth, id, photoId)) throw new ProblemError('not-found');
-      repo.touch(auth, id, now());
+      if (!photos.remove(auth, { setId: id, photoId }, now())) throw new ProblemError('not-found');
     },
 
     orderPhotos(auth: Editing, id: number, photoIds: readonly number[]): { items: Photo[]; total: number } {
       required(auth, id);
-      if (!photos.order(auth, id, photoIds))
+      if (!photos.order(auth, id, photoIds, now()))
         throw fieldError('photoIds', 'Name every photograph of the set once. Load the page again and repeat.');
       const items = photos.of(id).map(shownPhoto);
       return { items, total: items.length };
@@ -211,73 +213,6 @@ export function createSetsService(deps: {
       });
       return { items, total: items.length };
     },
-  };
-}
-
-type PriceColumns = Pick<OwnedSet, 'priceCents' | 'priceCurrency' | 'pricePeriod' | 'priceSource'>;
-
-function priceOf({ priceCents, pricePeriod, priceSource }: PriceColumns) {
-  if (priceCents === null || pricePeriod === null || priceSource === null) return null;
-  const period: Period = expectOk(parsePeriod(pricePeriod));
-  return { amount: centsToDecimal(cents(priceCents)), currency: 'USD' as const, period, source: priceSource };
-}
-
-function valuesOf({ priceWhenNew, hazards: _, ...same }: SetInput): SetValues {
-  return {
-    ...same,
-    priceCents: priceWhenNew === null ? null : toCents(priceWhenNew.amount),
-    priceCurrency: priceWhenNew?.currency ?? null,
-    pricePeriod: priceWhenNew?.period ?? null,
-    priceSource: priceWhenNew?.source ?? null,
-  };
-}
-
-function identityOf(set: OwnedSet) {
-  return {
-    id: set.id,
-    number: formatNumber('S', set.id),
-    version: set.version,
-    kind: set.kind,
-    maker: set.maker,
-    model: set.model,
-    description: set.description,
-    chassis: set.chassis,
-    serial: set.serial,
-    year: set.year,
-    ownerId: set.ownerId,
-    ownerName: set.ownerName,
-    priceIsPublic: set.priceIsPublic,
-    provenance: set.provenance,
-    alterations: set.alterations,
-    notes: set.notes,
-    archived: set.archived,
-    updatedAt: new Date(set.updatedAt).toISOString(),
-  };
-}
-
-const moneyOf = (amount: number, currency: string) => ({ amount: centsToDecimal(cents(amount)), currency });
-const photoAddress = (id: number, size: 'large' | 'small') => `/api/photos/${id}/${size}`;
-
-const shownPhoto = ({ setId: _, ...photo }: PhotoRow): Photo => ({
-  ...photo,
-  large: photoAddress(photo.id, 'large'),
-  small: photoAddress(photo.id, 'small'),
-});
-
-function shownWorth(row: WorthRow & { readonly recorder: string }): Worth {
-  const optional = (amount: number | null) => (amount === null ? null : moneyOf(amount, row.currency));
-  return {
-    id: row.id,
-    kind: row.kind,
-    amount: moneyOf(row.amountCents, row.currency),
-    low: optional(row.lowCents),
-    high: optional(row.highCents),
-    valueType: row.valueType,
-    effectiveOn: row.effectiveOn,
-    saidBy: row.saidBy,
-    basis: row.basis,
-    recordedBy: row.recorder,
-    recordedAt: new Date(row.recordedAt).toISOString(),
   };
 }
 
