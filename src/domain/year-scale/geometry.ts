@@ -104,10 +104,10 @@ function drawFeet(input: YearScaleInput, axis: YearAxis, measures: Measures): Fe
 /** Where no numeral may stand. */
 function takenBy(input: YearScaleInput, axis: YearAxis, measures: Measures, feet: Feet): Stretch[] {
   const taken: Stretch[] = [];
+  const clearance = measures.multipliers ? 8 : 4; // a multiplier is wider than its numeral
   for (const who of ['then', 'now'] as const) {
     const x = axis.xOf(input[who].period);
-    // wide enough for the multiplier under the numeral too
-    taken.push({ from: x - 8, to: x + 8 });
+    taken.push({ from: x - clearance, to: x + clearance });
     const year = feet.years[who];
     if (!year) continue;
     const half = textWidth(year.text, year.size) / 2 + 8;
