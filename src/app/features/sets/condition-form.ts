@@ -29,7 +29,7 @@ export class ConditionForm {
   readonly parts = input.required<readonly PartCondition[]>();
 
   readonly recorded = output();
-  readonly cancel = output();
+  readonly cancelled = output();
 
   private readonly store = inject(SetStore);
   private readonly fb = inject(NonNullableFormBuilder);

@@ -15,9 +15,10 @@ export class LastUsedFilter {
   }
 
   write(params: Params): void {
-    const { page: _, ...kept } = params as Record<string, string>;
+    const kept = new URLSearchParams(params);
+    kept.delete('page');
     try {
-      this.storage?.setItem(this.key(), new URLSearchParams(kept).toString());
+      this.storage?.setItem(this.key(), kept.toString());
     } catch (error) {
       // A full or forbidden storage costs a convenience only.
       if (!(error instanceof DOMException)) throw error;

@@ -15,7 +15,7 @@ import { WorthHistory } from './worth-history';
   template: `
     @if (store.set(); as set) {
       @if (recording(); as kind) {
-        <tw-worth-form [kind]="kind" (recorded)="recording.set(null)" (cancel)="recording.set(null)" />
+        <tw-worth-form [kind]="kind" (recorded)="recording.set(null)" (cancelled)="recording.set(null)" />
       } @else if (store.mayRecordWorth()) {
         <div class="tw-actions">
           <button matButton="filled" type="button" (click)="recording.set('as-found')">Record worth as found</button>

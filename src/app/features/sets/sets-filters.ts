@@ -32,7 +32,7 @@ export class SetsFilters {
   readonly owners = input.required<readonly { readonly id: number; readonly name: string }[]>();
   readonly narrowed = input.required<boolean>();
 
-  readonly change = output<QueryChange>();
+  readonly queryChange = output<QueryChange>();
   readonly clear = output();
 
   protected readonly kinds = SET_KINDS.map((value) => ({ value, label: SET_KIND_LABELS[value] }));
@@ -57,11 +57,11 @@ export class SetsFilters {
   protected find(): void {
     const q = this.search.value.trim();
     const before = this.query().q;
-    if (q !== before) this.change.emit({ part: { q }, replace: before !== '' });
+    if (q !== before) this.queryChange.emit({ part: { q }, replace: before !== '' });
   }
 
   protected pick(name: 'kind' | 'maker' | 'ownerId' | 'state' | 'sort', event: Event): void {
     const { value } = event.target as HTMLSelectElement;
-    this.change.emit({ part: { [name]: value }, replace: false });
+    this.queryChange.emit({ part: { [name]: value }, replace: false });
   }
 }

@@ -44,7 +44,7 @@ export class WorthForm {
   readonly kind = input.required<WorthKind>();
 
   readonly recorded = output();
-  readonly cancel = output();
+  readonly cancelled = output();
 
   private readonly store = inject(SetStore);
   private readonly amount = viewChild.required<ElementRef<HTMLInputElement>>('amount');
