@@ -97,6 +97,9 @@ import { StatusChip } from '../../ui/status-chip';
         text-align: left;
         white-space: normal;
       }
+      td.tw-num {
+        text-align: left;
+      }
       td::before {
         content: attr(data-label) ': ';
         color: var(--mat-sys-on-surface-variant);
