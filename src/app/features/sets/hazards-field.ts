@@ -74,6 +74,8 @@ const ELECTRIC: readonly Hazard[] = ['high-voltage', 'stored-charge', 'hot-chass
     }
     .detail {
       display: flex;
+      align-items: start;
+      margin-bottom: 12px;
       gap: 12px;
       margin-left: 12px;
     }
