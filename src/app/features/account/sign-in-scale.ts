@@ -15,8 +15,8 @@ import { ApiClient } from '../../core/api-client';
 import { elementWidth } from '../../ui/element-width';
 import { YearScaleSvg } from '../../ui/year-scale-drawing';
 
-const PRICE = '200.00';
-const PAID = '1917' as Period;
+const PRICE = '39.95';
+const PAID = '1938' as Period;
 const NARROW_UNDER = 560;
 
 /** The year scale beside the sign-in form, from the published figures. Where they cannot be had it stays away. */
@@ -56,7 +56,7 @@ export class SignInScale {
     const content = this.content();
     return content === null
       ? ''
-      : `Published annual average of 1917 to ${formatPeriod(content.to)}, CPI-U. Not what a set is worth.`;
+      : `By the published index, ${PAID} to ${formatPeriod(content.to)}, CPI-U. It is not what a set is worth.`;
   });
 
   private figures(): Observable<IndexSeries | null> {
