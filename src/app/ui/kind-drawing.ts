@@ -61,6 +61,7 @@ const DRAWINGS: Readonly<Record<SetKind, Drawing>> = {
       stroke-width: 1.2;
       stroke-linecap: round;
       stroke-linejoin: round;
+      vector-effect: non-scaling-stroke;
     }
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -1,6 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import type { RestatedPrice } from '../../../contracts/sets';
-import { formatPeriod, parsePeriod } from '../../../domain/calendar/period';
 import { bandSentences, exactText } from './restated-words';
 
 /** How to read the year scale of a set: the sum, both bands, and that none of it is worth. Presentational. */
@@ -19,9 +18,7 @@ import { bandSentences, exactText } from './restated-words';
         <strong>What that is in money now is not known.</strong>
         {{ price.reason }}
       </p>
-      @if (neighbours()) {
-        <p class="tw-basis">Nearest published periods: {{ neighbours() }}. Nothing is interpolated.</p>
-      }
+      <p class="tw-basis">Nothing is interpolated.</p>
     }
   `,
   styles: `
@@ -44,15 +41,5 @@ export class PriceReading {
   protected readonly bands = computed(() => {
     const price = this.restated();
     return price.known ? bandSentences(price).join(' ') : '';
-  });
-  protected readonly neighbours = computed(() => {
-    const price = this.restated();
-    if (price.known) return '';
-    return price.neighbours
-      .map((text) => {
-        const parsed = parsePeriod(text);
-        return parsed.ok ? formatPeriod(parsed.value) : text;
-      })
-      .join(' and ');
   });
 }

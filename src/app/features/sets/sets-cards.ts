@@ -35,7 +35,7 @@ import { priceText, wholeText } from './set-words';
             </div>
             <div>
               <dt>Restored</dt>
-              <dd class="strong">{{ wholeText(set.worthRestored) }}</dd>
+              <dd [class.strong]="set.worthRestored !== null">{{ wholeText(set.worthRestored) }}</dd>
             </div>
           </dl>
         </li>
