@@ -13,10 +13,14 @@ export interface StartedServer {
 }
 
 /** Starts the built server as `npm start` does, on a free port, over the data folder given. */
-export async function startServer(dataFolder: string, args: readonly string[] = []): Promise<StartedServer> {
+export async function startServer(
+  dataFolder: string,
+  args: readonly string[] = [],
+  env: NodeJS.ProcessEnv = {},
+): Promise<StartedServer> {
   const child = spawn(process.execPath, [join(ROOT, 'dist/server/main.js'), ...args], {
     cwd: ROOT,
-    env: { ...process.env, PORT: '0', THENWORTH_DATA: dataFolder, NODE_ENV: 'development' },
+    env: { ...process.env, PORT: '0', THENWORTH_DATA: dataFolder, NODE_ENV: 'development', ...env },
   });
   let output = '';
   const exited = new Promise<number | null>((resolve) => child.once('exit', (code) => resolve(code)));

@@ -158,7 +158,9 @@ export function createAccountsService(deps: {
           detail: 'The practice needs an administrator who can sign in. Name another one first.',
         });
       if (disabled === true) repo.sessions.endAll(id);
-      return shown(required(id));
+      const row = required(id);
+      if (row.role === 'collector' && mayEnter(row)) owners.linkUser(row.email, id);
+      return shown(row);
     },
 
     invitation(token: string) {

@@ -91,7 +91,7 @@ export class EstimateLines {
     });
   }
 
-  protected cancel(): void {
+  protected giveUp(): void {
     const backTo = this.store.openLine()?.lineId ?? null;
     this.store.closeLine();
     if (backTo !== null) this.focusRow(backTo);

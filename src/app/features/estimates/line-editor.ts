@@ -55,7 +55,7 @@ const FIELDS = {
   imports: [MatButton, Notice, ReactiveFormsModule],
   templateUrl: './line-editor.html',
   styleUrl: './line-editor.scss',
-  host: { '(focusout)': 'left($event)', '(keydown.escape)': 'cancel.emit()' },
+  host: { '(focusout)': 'left($event)', '(keydown.escape)': 'giveUp.emit()' },
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class LineEditor implements OnInit {
@@ -67,7 +67,7 @@ export class LineEditor implements OnInit {
   readonly typed = output<TypedLine>();
   /** `another`: begin a next line of the same kind and stage when saved. */
   readonly save = output<{ readonly content: LineContent; readonly another: boolean }>();
-  readonly cancel = output();
+  readonly giveUp = output();
   readonly keepMine = output<LineContent>();
   readonly takeTheirs = output();
   readonly addMine = output<LineContent>();

@@ -1,0 +1,96 @@
+import type { Browser, BrowserContext } from 'playwright-core';
+import { seriousFindings } from '../support/axe';
+import { launchBrowser } from '../support/browser';
+import { startServer, temporaryFolder, type StartedServer } from '../support/started-server';
+
+/** Every page of the demo practice, wide and narrow, light and dark: nothing serious for axe, no sideways scroll. */
+const folder = temporaryFolder();
+let server: StartedServer;
+let browser: Browser;
+
+beforeAll(async () => {
+  [server, browser] = await Promise.all([startServer(folder.path), launchBrowser()]);
+}, 120_000);
+afterAll(async () => {
+  await browser?.close();
+  await server?.stop();
+  folder.remove();
+});
+
+const WINDOWS = [
+  { name: '1440 light', width: 1440, scheme: 'light' },
+  { name: '390 dark', width: 390, scheme: 'dark' },
+] as const;
+
+async function contextOf(width: number, colorScheme: 'light' | 'dark', who: string | null): Promise<BrowserContext> {
+  const context = await browser.newContext({
+    baseURL: server.address,
+    viewport: { width, height: 844 },
+    colorScheme,
+    reducedMotion: 'reduce',
+  });
+  if (who !== null) {
+    const answer = await context.request.post('/api/session', {
+      data: { email: `${who}@quayside.example`, password: 'thenworth-demo' },
+    });
+    expect(answer.status()).toBe(200);
+  }
+  return context;
+}
+
+/** Page, who looks, and the words it must show. Numbers in braces are found by asking the API for the set «Meridian». */
+const PAGES = [
+  ['/then-and-now', null, 'What it cost then'],
+  ['/then-and-now?amount=100&from=2025-10', null, 'Sep 2025'],
+  ['/sign-in', null, 'Sign in'],
+  ['/nothing-at-this-address', null, 'nothing at this address'],
+  ['/sets', 'restorer', 'Halloway 41-X'],
+  ['/sets?q=no-such-set-anywhere', 'restorer', 'No set matches'],
+  ['/sets/new', 'restorer', 'Register a set'],
+  ['/sets/{set}', 'restorer', 'Cost against worth'],
+  ['/sets/{set}/edit', 'restorer', 'Price when new'],
+  ['/sets/{set}/condition', 'restorer', 'Condition'],
+  ['/sets/{set}/worth', 'restorer', 'Worth'],
+  ['/sets/{set}/photos', 'restorer', 'Choose files'],
+  ['/sets/{bare}', 'restorer', 'Not known'],
+  ['/sets/{set}', 'collector', 'Cost against worth'],
+  ['/estimates', 'restorer', 'Estimates'],
+  ['/estimates/{estimate}', 'restorer', 'What it comes to'],
+  ['/estimates/{estimate}', 'collector', 'What it comes to'],
+  ['/papers/sets/{set}/appraisal-sheet', 'restorer', 'Appraisal sheet'],
+  ['/papers/estimates/{estimate}/restoration-estimate', 'restorer', 'Restoration estimate'],
+  ['/people', 'admin', 'appraiser@quayside.example'],
+  ['/people', 'restorer', 'Your role does not open this page'],
+  ['/practice', 'admin', 'Markup on parts'],
+  ['/account', 'collector', 'Change your password'],
+] as const;
+
+describe.each(WINDOWS)('$name', ({ width, scheme }) => {
+  test.each(PAGES)('%s as %s', async (path, who, words) => {
+    const context = await contextOf(width, scheme, who);
+    const ids = who === null || !path.includes('{') ? {} : await idsFor(context);
+    const page = await context.newPage();
+    const troubles: string[] = [];
+    page.on('pageerror', (error) => troubles.push(String(error)));
+    page.on('console', (message) => {
+      if (message.type() === 'error' && !/status of 4\d\d/.test(message.text())) troubles.push(message.text());
+    });
+    await page.goto(path.replace(/\{(\w+)\}/g, (_, name: string) => String(ids[name])));
+    await page.getByText(words).filter({ visible: true }).first().waitFor({ timeout: 15_000 });
+    await page.waitForLoadState('networkidle');
+    expect(await page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth)).toBeLessThanOrEqual(0);
+    expect(await page.locator('h1').count()).toBeGreaterThan(0);
+    expect(await page.evaluate(() => document.fonts.check('16px Lato'))).toBe(true);
+    expect(await seriousFindings(page)).toEqual([]);
+    expect(troubles).toEqual([]);
+    await context.close();
+  });
+});
+
+async function idsFor(context: BrowserContext): Promise<Record<string, number>> {
+  const json = async (path: string) => (await context.request.get(path)).json();
+  const set = (await json('/api/sets?q=meridian')).items[0].id as number;
+  const estimate = (await json(`/api/estimates?setId=${set}`)).items[0].id as number;
+  const bare = ((await json('/api/sets?q=identified')).items[0]?.id ?? 0) as number;
+  return { set, estimate, bare };
+}
