@@ -1,5 +1,6 @@
 import * as z from 'zod';
 import { ROLES } from '../domain/access/policy';
+import { isTooLarge } from '../domain/estimate/line';
 import { STAGES, TAX_TREATMENTS } from '../domain/estimate/terms';
 import {
   amount,
@@ -45,7 +46,16 @@ const partContent = z.object({
 /** Work sent out: the other shop's quote × (1 + markup). */
 const outsideContent = z.object({ kind: z.literal('outside'), ...common, quote: moneyAmount, markupPercent: percent });
 
-export const lineContent = z.discriminatedUnion('kind', [labourContent, partContent, outsideContent]);
+/** The field that is told when a line comes to more. */
+const LARGEST_BY = { labour: 'rate', part: 'unitCost', outside: 'quote' } as const;
+
+export const lineContent = z
+  .discriminatedUnion('kind', [labourContent, partContent, outsideContent])
+  .check(({ value, issues }) => {
+    if (issues.length > 0 || !isTooLarge(value)) return;
+    const message = 'The line comes to more than 999,999,999.99.';
+    issues.push({ code: 'custom', input: value, path: [LARGEST_BY[value.kind]], message });
+  });
 export type LineContent = z.infer<typeof lineContent>;
 
 export const estimateLine = z.object({

@@ -231,6 +231,13 @@ test('lines keep the order they are given, within their stage', async () => {
     .send({ content: named('b', 'intake'), version: 1 })
     .expect(200);
   expect(await order()).toBe('first b a a+ c');
+  await restorer
+    .put(`/api/estimates/${id}/lines/${a.lineId}`)
+    .send({ content: named('a', 'intake'), version: 1 })
+    .expect(200);
+  expect(await order()).toBe('first b a a+ c');
+  await add(id, named('last', 'intake'));
+  expect(await order()).toBe('first b a last a+ c');
 });
 
 test('archiving takes it off the list and back', async () => {
@@ -241,6 +248,36 @@ test('archiving takes it off the list and back', async () => {
   expect([await listed('pageSize=200'), await listed('state=archived&pageSize=200')]).toEqual([false, true]);
   await restorer.put(`/api/estimates/${id}/archived`).send({ archived: false }).expect(200);
   expect(await listed(`q=e-${id}`)).toBe(true);
+});
+
+test('the list is sorted, paged and searched by what it shows', async () => {
+  const named = async (model: string, title: string, quote: string) => {
+    const set = (
+      await restorer
+        .post('/api/sets')
+        .send({ ...SET, maker: 'Lyndmoor', model })
+        .expect(201)
+    ).body;
+    const { id } = (await restorer.post(`/api/sets/${set.id}/estimates`).send({ title }).expect(201)).body;
+    await add(id, { ...OUTSIDE, quote, markupPercent: '0' });
+    app.clock.now += 1000;
+  };
+  await named('Bravo', 'Réglage complet', '90.00');
+  await named('alpha', 'Cabinet only', '1000.00');
+  await named('Charlie', 'Cabinet and 100 % of the wiring', '200.00');
+  const titles = async (query: string) => {
+    const { items, total } = (await restorer.get(`/api/estimates?${query}`).expect(200)).body;
+    return [total, ...items.map(({ setName }: { setName: string }) => setName.replace('Lyndmoor ', ''))];
+  };
+  expect(await titles('q=lyndmoor&sort=-updated')).toEqual([3, 'Charlie', 'alpha', 'Bravo']);
+  expect(await titles('q=lyndmoor&sort=-total')).toEqual([3, 'alpha', 'Charlie', 'Bravo']);
+  expect(await titles('q=lyndmoor&sort=set')).toEqual([3, 'alpha', 'Bravo', 'Charlie']);
+  expect(await titles('q=lyndmoor&sort=number')).toEqual([3, 'Bravo', 'alpha', 'Charlie']);
+  expect(await titles('q=lyndmoor&sort=number&pageSize=2&page=2')).toEqual([3, 'Charlie']);
+  expect(await titles('q=REGLAGE')).toEqual([1, 'Bravo']);
+  expect(await titles('q=cabinet+lyndmoor+only')).toEqual([1, 'alpha']);
+  expect(await titles('q=%25+lyndmoor')).toEqual([1, 'Charlie']); // a percent sign is itself, not a wildcard
+  await restorer.get('/api/estimates?sort=gap').expect(400);
 });
 
 describe('bad input names the field', () => {
@@ -285,12 +322,51 @@ describe('bad input names the field', () => {
   });
 });
 
-test('the largest amounts still add up exactly', async () => {
-  const { id } = await begin();
-  const { estimate } = await add(id, {
-    ...LABOUR,
-    hours: { low: '9999.99', likely: '9999.99', high: '9999.99' },
-    rate: '999999999.99',
+describe('the largest amounts', () => {
+  const largest = { ...OUTSIDE, quote: '999999999.99', markupPercent: '0' };
+
+  test.each([
+    [{ ...LABOUR, hours: { low: '1', likely: '1', high: '9999.99' }, rate: '999999999.99' }, 'content.rate'],
+    [{ ...PART, quantity: '999999.999', unitCost: '999999999.9999', markupPercent: '999' }, 'content.unitCost'],
+    [{ ...largest, markupPercent: '0.0001' }, 'content.quote'],
+  ])('%j comes to too much: %s', async (content, field) => {
+    const { id } = await begin();
+    const { body } = await restorer.post(`/api/estimates/${id}/lines`).send({ content, afterLineId: null }).expect(400);
+    expect(body.fields.map((f: { field: string }) => f.field)).toEqual([field]);
+    expect((await restorer.get(`/api/estimates/${id}`)).status).toBe(200);
   });
-  expect(estimate.totals.likely.labour).toBe('9999989999900.00');
+
+  test('add up exactly, at the highest tax', async () => {
+    const { id } = await begin();
+    await add(id, largest);
+    const { estimate } = await add(id, { ...largest, stage: 'return' });
+    expect(estimate.totals.likely.subtotal).toBe('1999999999.98');
+    const { title, taxNote, depositPercent, notes, version } = estimate;
+    const { body } = await restorer
+      .put(`/api/estimates/${id}`)
+      .send({ title, taxNote, depositPercent, notes, version, taxTreatment: 'both', taxRatePercent: '999.9999' })
+      .expect(200);
+    // 1999999999.98 × 9.999999 = 19999997999.79800002
+    expect(body.totals.likely).toMatchObject({ tax: '19999997999.80', total: '21999997999.78' });
+  });
+
+  test('an estimate has a thousand lines at most', async () => {
+    const { id } = await begin();
+    const { lineId } = await add(id, PART);
+    const { sqlite } = app.database;
+    const others = sqlite.pragma('table_info(estimate_lines)') as { name: string }[];
+    const columns = others.map(({ name }) => name).filter((name) => name !== 'id');
+    sqlite
+      .prepare(
+        `with recursive n(i) as (select 1 union all select i + 1 from n where i < 998)
+         insert into estimate_lines (${columns.join()}) select ${columns.join()} from estimate_lines, n where id = ?`,
+      )
+      .run(lineId);
+    const { lineId: last, estimate } = await add(id, PART);
+    expect(estimate.lines).toHaveLength(1000);
+    const send = () => restorer.post(`/api/estimates/${id}/lines`).send({ content: PART, afterLineId: null });
+    expect((await send().expect(400)).body.fields[0]).toMatchObject({ field: 'content' });
+    await restorer.delete(`/api/estimates/${id}/lines/${last}?version=1`).expect(200);
+    await send().expect(201);
+  });
 });

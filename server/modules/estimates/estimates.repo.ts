@@ -71,6 +71,16 @@ export function createEstimatesRepo(db: Database) {
   const touch = (tx: Tx, estimateId: number, now: number) =>
     tx.update(estimates).set({ updatedAt: now }).where(eq(estimates.id, estimateId)).run();
 
+  /** The position behind the last line of a stage. */
+  function endOf(tx: Tx, estimateId: number, stage: LineRow['stage']): number {
+    const last = tx
+      .select({ at: max(estimateLines.position) })
+      .from(estimateLines)
+      .where(and(eq(estimateLines.estimateId, estimateId), eq(estimateLines.stage, stage)))
+      .get();
+    return (last?.at ?? 0) + 1;
+  }
+
   /** Puts a line behind another of its stage, or first, and numbers the stage's lines anew. */
   function place(tx: Tx, line: Pick<LineRow, 'id' | 'estimateId' | 'stage'>, afterLineId: number | null): void {
     const others = tx
@@ -142,14 +152,9 @@ export function createEstimatesRepo(db: Database) {
     ): number =>
       db.transaction(
         (tx) => {
-          const last = tx
-            .select({ at: max(estimateLines.position) })
-            .from(estimateLines)
-            .where(and(eq(estimateLines.estimateId, estimateId), eq(estimateLines.stage, columns.stage)))
-            .get();
           const line = tx
             .insert(estimateLines)
-            .values({ ...columns, estimateId, position: (last?.at ?? 0) + 1 })
+            .values({ ...columns, estimateId, position: endOf(tx, estimateId, columns.stage) })
             .returning()
             .get();
           if (afterLineId !== null) place(tx, line, afterLineId);
@@ -163,10 +168,11 @@ export function createEstimatesRepo(db: Database) {
     updateLine: (_auth: Editing, before: LineRow, version: number, columns: LineColumns, now: number): boolean =>
       db.transaction(
         (tx) => {
-          const moved = columns.stage !== before.stage;
+          const position =
+            columns.stage === before.stage ? before.position : endOf(tx, before.estimateId, columns.stage);
           const { changes } = tx
             .update(estimateLines)
-            .set({ ...columns, version: version + 1, ...(moved ? { position: 1_000_000 } : {}) })
+            .set({ ...columns, position, version: version + 1 })
             .where(and(eq(estimateLines.id, before.id), eq(estimateLines.version, version)))
             .run();
           if (changes === 0) return false;

@@ -8,7 +8,7 @@ import type {
   updateEstimate,
 } from '../../../src/contracts/estimates';
 import type { Action } from '../../../src/domain/access/policy';
-import { lineNet, type Line } from '../../../src/domain/estimate/line';
+import { lineNet, MOST_LINES, type Line } from '../../../src/domain/estimate/line';
 import { estimateTotals, type Terms, type Totals } from '../../../src/domain/estimate/totals';
 import { costAgainstWorth, type StatedWorth, type Verdict } from '../../../src/domain/estimate/verdict';
 import { worthInForce } from '../../../src/domain/market/worth';
@@ -86,13 +86,11 @@ export function createEstimatesService(deps: {
   function list(auth: Authorized<'estimate.view'>, query: Query): { items: EstimateSummary[]; total: number } {
     const { q = '', setId, state, sort, page, pageSize } = query;
     const found = repo.list(auth, { q, setId, state });
-    const lines = repo.lines(found.map(({ id }) => id));
+    const lines = new Map<number, Line[]>(found.map(({ id }) => [id, []]));
+    for (const row of repo.lines([...lines.keys()])) lines.get(row.estimateId)?.push(contentOf(row));
     const worths = sets.worthsOf(found.map((estimate) => estimate.setId));
     const items = found.map((estimate): EstimateSummary => {
-      const totals = estimateTotals(
-        lines.filter(({ estimateId }) => estimateId === estimate.id).map(contentOf),
-        termsOf(estimate),
-      );
+      const totals = estimateTotals(lines.get(estimate.id) ?? [], termsOf(estimate));
       const verdict = verdictOf(worths.get(estimate.setId) ?? [], totals);
       return {
         id: estimate.id,
@@ -157,6 +155,8 @@ export function createEstimatesService(deps: {
     addLine(auth: Editing, id: number, input: { readonly content: LineContent; readonly afterLineId: number | null }) {
       required(auth, id);
       if (input.afterLineId !== null) requiredNeighbour(auth, id, input.afterLineId, input.content.stage);
+      if (repo.lines([id]).length >= MOST_LINES)
+        throw fieldError('content', `An estimate has at most ${MOST_LINES} lines; begin another for the rest.`);
       const lineId = repo.insertLine(auth, id, columnsOf(input.content), input.afterLineId, now());
       return { lineId, estimate: get(auth, id) };
     },

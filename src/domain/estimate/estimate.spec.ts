@@ -1,7 +1,7 @@
 import * as fc from 'fast-check';
 import { Dec } from '../money/decimal';
 import { centsToDecimal } from '../money/money';
-import { expectedHours, lineNet, marginOfMarkup, type Line } from './line';
+import { expectedHours, isTooLarge, LARGEST_NET, lineNet, marginOfMarkup, MOST_LINES, type Line } from './line';
 import { LINE_KINDS, STAGES, TAX_TREATMENTS } from './terms';
 import { estimateTotals, percentOf, taxPerItem, type Terms } from './totals';
 
@@ -66,6 +66,12 @@ describe('a line', () => {
     const outside: Line = { kind: 'outside', ...placed, quote: '150.00', markupPercent: '10' };
     expect([lineNet(outside, 'low'), lineNet(outside, 'high')]).toEqual([16_500, 16_500]);
   });
+  test('comes to nine digits at most, at its high hours', () => {
+    const labour: Line = { kind: 'labour', ...placed, hours, rate: '153846153.84' };
+    expect([isTooLarge(labour), isTooLarge({ ...labour, rate: '153846153.85' })]).toEqual([false, true]);
+    const part: Line = { kind: 'part', ...placed, quantity: '999999', unitCost: '999999999', markupPercent: '999' };
+    expect(isTooLarge(part)).toBe(true); // though too large for exact cents, it throws nothing
+  });
   test('expected hours are the mean of the three points', () => {
     expect(expectedHours(hours)).toBe('4.67');
     expect(expectedHours({ low: '2', likely: '2', high: '2' })).toBe('2.00');
@@ -94,6 +100,22 @@ describe('an estimate', () => {
       { kind: 'outside', stage: 'test', description: 'x', quote: '110.00', markupPercent: '0' },
     ];
     expect(estimateTotals(all, { ...TERMS, taxTreatment }).likely).toMatchObject({ subtotal: '1110.00', taxable, tax });
+  });
+
+  test('of the most and largest lines still adds up in exact cents', () => {
+    const largest: Line = {
+      kind: 'outside',
+      stage: 'test',
+      description: 'x',
+      quote: LARGEST_NET,
+      markupPercent: '0',
+    };
+    const all = Array<Line>(MOST_LINES).fill(largest);
+    expect(estimateTotals(all, { ...TERMS, taxRatePercent: '999.9999' }).high).toMatchObject({
+      subtotal: '999999999990.00',
+      tax: '9999998999900.00',
+      total: '10999998999890.00',
+    });
   });
 
   test('whose sums agree, whatever its lines', () => {
@@ -156,4 +178,8 @@ test('tax by the item can differ from tax on the sum by cents', () => {
 
 test('a markup names the margin it amounts to', () => {
   expect(['25', '50', '100', '0', '30'].map(marginOfMarkup)).toEqual(['20', '33.33', '50', '0', '23.08']);
+});
+
+test('no markup amounts to a margin of the whole price', () => {
+  fc.assert(fc.property(percent, (markup) => new Dec(marginOfMarkup(markup)).lt(100)));
 });

@@ -42,14 +42,24 @@ export type Line = LabourLine | PartLine | OutsideLine;
  * Exact until the end, then rounded once to two decimals, half away from zero: the line's net amount of EN 16931,
  * which later sums take as it stands.
  */
-export function lineNet(line: Line, point: Point): Cents {
+export const lineNet = (line: Line, point: Point): Cents => toCents(exactNet(line, point));
+
+/** The most a line may come to: nine digits before the point, like every amount typed. */
+export const LARGEST_NET = '999999999.99';
+/** The most lines an estimate may have. With `LARGEST_NET` and any tax below 1,000 %, its total stays exact in cents. */
+export const MOST_LINES = 1000;
+
+/** Whether a line comes to more than `LARGEST_NET` at its high hours. */
+export const isTooLarge = (line: Line): boolean => exactNet(line, 'high').gt(LARGEST_NET);
+
+function exactNet(line: Line, point: Point): Dec {
   switch (line.kind) {
     case 'labour':
-      return toCents(new Dec(line.hours[point]).times(line.rate));
+      return new Dec(line.hours[point]).times(line.rate);
     case 'part':
-      return toCents(withMarkup(new Dec(line.quantity).times(line.unitCost), line.markupPercent));
+      return withMarkup(new Dec(line.quantity).times(line.unitCost), line.markupPercent);
     case 'outside':
-      return toCents(withMarkup(new Dec(line.quote), line.markupPercent));
+      return withMarkup(new Dec(line.quote), line.markupPercent);
   }
 }
 
