@@ -200,13 +200,17 @@ const round = (value: number): number => Math.round(value * 10) / 10;
 export function costAgainstWorthSentence(figures: CostAgainstWorthFigures): string {
   const { currency, asFound, asRestored, cost } = figures;
   const whole = (amount: number) => formatMoney(String(amount), currency, { whole: true });
-  const gap = Math.round(asRestored - asFound - cost.likely);
+  const uplift = asRestored - asFound;
+  const gap = Math.round(uplift - cost.likely);
+  const added = uplift < 0 ? `it takes ${whole(-uplift)} off the worth` : `it adds ${whole(uplift)}`;
   const answer =
     gap === 0
       ? 'that is even'
       : gap > 0
         ? `that is ${whole(gap)} more than it costs`
-        : `it costs ${whole(-gap)} more than that`;
+        : uplift < 0
+          ? `${whole(-gap)} lost in all`
+          : `it costs ${whole(-gap)} more than that`;
   const range = cost.low < cost.high ? `, ${whole(cost.low)} to ${whole(cost.high)}` : '';
-  return `Worth ${whole(asFound)} as found and ${whole(asRestored)} restored. The work likely costs ${whole(cost.likely)}${range}; it adds ${whole(asRestored - asFound)}: ${answer}.`;
+  return `Worth ${whole(asFound)} as found and ${whole(asRestored)} restored. The work likely costs ${whole(cost.likely)}${range}; ${added}: ${answer}.`;
 }
