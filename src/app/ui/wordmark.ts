@@ -17,6 +17,7 @@ import { ChangeDetectionStrategy, Component, input } from '@angular/core';
     }
     svg {
       width: 100%;
+      height: auto;
     }
     text {
       font-family: Lato, sans-serif;
