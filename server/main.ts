@@ -5,7 +5,7 @@ import { dirname, join } from 'node:path';
 import { pino } from 'pino';
 import { DEMO_ACCOUNTS, DEMO_PASSWORD, seedDemoPractice } from '../seeds/demo';
 import { createApp } from './app';
-import { composeServices } from './composition';
+import { composeServices, type Services } from './composition';
 import { readConfig } from './config';
 import { openDatabase } from './db/client';
 import { migrateDatabase } from './db/migrate';
@@ -64,15 +64,17 @@ async function start(): Promise<void> {
   server.listen(config.port, HOST, () => {
     const address = server.address();
     const port = typeof address === 'object' && address !== null ? address.port : config.port;
-    say(`\nThenworth is at http://${HOST}:${port}/  (data in ${config.dataFolder})`);
-    if (services.practice.settings()?.demo === true)
-      say(
-        ['Demo accounts, password ' + DEMO_PASSWORD + ':', ...DEMO_ACCOUNTS.map((a) => `  ${a.email}  ${a.role}`)].join(
-          '\n',
-        ),
-      );
-    else if (!services.accounts.hasAnyone()) say('A clean practice: open the address to name its first administrator.');
+    say(`\nThenworth is at http://${HOST}:${port}/  (data in ${config.dataFolder})\n${welcome(services)}`);
   });
+}
+
+/** Whom to sign in as: the demo accounts, or the first administrator still to be named. */
+function welcome({ accounts, practice }: Services): string {
+  if (practice.settings()?.demo === true)
+    return [`Demo accounts, password ${DEMO_PASSWORD}:`, ...DEMO_ACCOUNTS.map((a) => `  ${a.email}  ${a.role}`)].join(
+      '\n',
+    );
+  return accounts.hasAnyone() ? '' : 'A clean practice: open the address to name its first administrator.';
 }
 
 start().catch((error: unknown) => {

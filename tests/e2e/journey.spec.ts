@@ -3,7 +3,7 @@ import type { Browser, BrowserContext, Page } from 'playwright-core';
 import sharp from 'sharp';
 import { launchBrowser } from '../support/browser';
 import { hasTool, pdfText } from '../support/pdf-text';
-import { startServer, temporaryFolder, type StartedServer } from '../support/started-server';
+import { startServer, stopServers, temporaryFolder, type StartedServer } from '../support/started-server';
 
 /** A newcomer's whole job in real Chromium, over a server started as the README says; each test goes on from the last. */
 const folder = temporaryFolder();
@@ -20,7 +20,7 @@ beforeAll(async () => {
 }, 120_000);
 afterAll(async () => {
   await browser?.close();
-  await server?.stop();
+  stopServers();
   folder.remove();
 });
 

@@ -1,7 +1,7 @@
 import type { Browser, BrowserContext } from 'playwright-core';
 import { seriousFindings } from '../support/axe';
 import { launchBrowser } from '../support/browser';
-import { startServer, temporaryFolder, type StartedServer } from '../support/started-server';
+import { startServer, stopServers, temporaryFolder, type StartedServer } from '../support/started-server';
 
 /** Every page of the demo practice, wide and narrow, light and dark: nothing serious for axe, no sideways scroll. */
 const folder = temporaryFolder();
@@ -13,7 +13,7 @@ beforeAll(async () => {
 }, 120_000);
 afterAll(async () => {
   await browser?.close();
-  await server?.stop();
+  stopServers();
   folder.remove();
 });
 

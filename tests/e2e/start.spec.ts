@@ -2,7 +2,7 @@ import { readdirSync, statSync } from 'node:fs';
 import { join } from 'node:path';
 import type { Browser } from 'playwright-core';
 import { launchBrowser } from '../support/browser';
-import { startServer, temporaryFolder } from '../support/started-server';
+import { startServer, stopServers, temporaryFolder } from '../support/started-server';
 
 /** The built server as a process: starting clean, starting again, stopping gently. */
 const folder = temporaryFolder();
@@ -10,6 +10,7 @@ let browser: Browser;
 beforeAll(async () => (browser = await launchBrowser()));
 afterAll(async () => {
   await browser?.close();
+  stopServers();
   folder.remove();
 });
 

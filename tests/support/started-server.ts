@@ -1,4 +1,4 @@
-import { spawn } from 'node:child_process';
+import { spawn, type ChildProcess } from 'node:child_process';
 import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
@@ -12,6 +12,13 @@ export interface StartedServer {
   stop(): Promise<number | null>;
 }
 
+const running = new Set<ChildProcess>();
+
+/** Ends every server that a failed test left behind; for `afterAll`. */
+export function stopServers(): void {
+  for (const child of running) child.kill('SIGKILL');
+}
+
 /** Starts the built server as `npm start` does, on a free port, over the data folder given. */
 export async function startServer(
   dataFolder: string,
@@ -22,8 +29,10 @@ export async function startServer(
     cwd: ROOT,
     env: { ...process.env, PORT: '0', THENWORTH_DATA: dataFolder, NODE_ENV: 'development', ...env },
   });
+  running.add(child);
   let output = '';
   const exited = new Promise<number | null>((resolve) => child.once('exit', (code) => resolve(code)));
+  void exited.then(() => running.delete(child));
   const address = await new Promise<string>((resolve, reject) => {
     const read = (chunk: Buffer) => {
       output += chunk.toString();
