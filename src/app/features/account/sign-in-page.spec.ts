@@ -1,16 +1,12 @@
 import { provideHttpClient } from '@angular/common/http';
 import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
 import { Component } from '@angular/core';
-import { TestBed } from '@angular/core/testing';
+import { DeferBlockBehavior, TestBed } from '@angular/core/testing';
 import { provideRouter, Router, withComponentInputBinding } from '@angular/router';
 import { RouterTestingHarness } from '@angular/router/testing';
 import { SessionStore } from '../../core/session';
 import { provideIcons } from '../../ui/provide-icons';
 import { SignInPage } from './sign-in-page';
-import { SignInScale } from './sign-in-scale';
-
-@Component({ selector: 'tw-sign-in-scale', template: '' })
-class NoScale {}
 
 @Component({ template: 'elsewhere' })
 class Elsewhere {}
@@ -20,8 +16,8 @@ let harness: RouterTestingHarness;
 let page: HTMLElement;
 
 async function open(address: string, demo = false) {
-  TestBed.overrideComponent(SignInPage, { remove: { imports: [SignInScale] }, add: { imports: [NoScale] } });
   TestBed.configureTestingModule({
+    deferBlockBehavior: DeferBlockBehavior.Manual, // the year scale beside the form stays away
     providers: [
       provideHttpClient(),
       provideHttpClientTesting(),

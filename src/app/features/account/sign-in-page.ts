@@ -1,9 +1,11 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { toSignal } from '@angular/core/rxjs-interop';
 import { NonNullableFormBuilder, ReactiveFormsModule } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import { MatError, MatFormField, MatLabel, MatSuffix } from '@angular/material/form-field';
 import { MatInput } from '@angular/material/input';
-import { Router, RouterLink } from '@angular/router';
+import { ActivatedRoute, Router, RouterLink } from '@angular/router';
+import { map } from 'rxjs';
 import { signIn } from '../../../contracts/session';
 import { fieldError, zodField } from '../../core/form-problems';
 import { FormSubmission } from '../../core/form-submission';
@@ -40,12 +42,13 @@ const { email, password } = signIn.body.shape;
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class SignInPage {
-  /** The address to go on to. */
-  readonly then = input<string>();
-
   private readonly sessions = inject(SessionStore);
   private readonly router = inject(Router);
 
+  /** The address to go on to, where one was asked for. No input of the page: a component with a `then` is awaited. */
+  protected readonly goOn = toSignal(inject(ActivatedRoute).queryParamMap.pipe(map((params) => params.get('then'))), {
+    requireSync: true,
+  });
   protected readonly demo = computed(() => this.sessions.session()?.demo === true);
   protected readonly practiceName = computed(() => this.sessions.session()?.practiceName ?? '');
   protected readonly form = inject(NonNullableFormBuilder).group({
@@ -62,7 +65,7 @@ export class SignInPage {
   protected signIn(): void {
     this.submission.send(
       () => this.sessions.signIn(this.form.getRawValue()),
-      () => void this.router.navigateByUrl(this.then() ?? HOME),
+      () => void this.router.navigateByUrl(this.goOn() ?? HOME),
     );
   }
 }
