@@ -62,6 +62,7 @@ test('begins with the practice’s rates and taxes, and keeps them when the prac
     number: expect.stringMatching(/^E-\d{4}$/),
     taxTreatment: 'parts',
     taxRatePercent: '6.875',
+    taxNote: 'State rule',
     depositPercent: '40',
     defaults: { labourRate: '68.00', partsMarkupPercent: '30' },
     preparedBy: 'Rui Restorer',
@@ -238,6 +239,34 @@ test('lines keep the order they are given, within their stage', async () => {
   expect(await order()).toBe('first b a a+ c');
   await add(id, named('last', 'intake'));
   expect(await order()).toBe('first b a last a+ c');
+});
+
+test('a line is reached only through its own estimate', async () => {
+  const [own, other] = [await begin(), await begin()];
+  const { lineId } = await add(own.id, PART);
+  const astray = `/api/estimates/${other.id}/lines/${lineId}`;
+  await restorer.put(astray).send({ content: LABOUR, version: 1 }).expect(404);
+  await restorer.put(`${astray}/place`).send({ afterLineId: null }).expect(404);
+  await restorer.delete(`${astray}?version=1`).expect(404);
+  expect((await restorer.get(`/api/estimates/${own.id}`)).body.lines).toMatchObject([{ version: 1, content: PART }]);
+});
+
+test('every change of a line moves the estimate’s date of change', async () => {
+  const { id, updatedAt } = await begin();
+  const seen = [updatedAt];
+  const after = (body: { updatedAt: string }) => seen.push(body.updatedAt);
+  const tick = () => (app.clock.now += 1000);
+  tick();
+  const { lineId, estimate } = await add(id, PART);
+  after(estimate);
+  const line = `/api/estimates/${id}/lines/${lineId}`;
+  tick();
+  after((await restorer.put(line).send({ content: LABOUR, version: 1 }).expect(200)).body);
+  tick();
+  after((await restorer.put(`${line}/place`).send({ afterLineId: null }).expect(200)).body);
+  tick();
+  after((await restorer.delete(`${line}?version=2`).expect(200)).body);
+  expect(new Set(seen).size).toBe(5);
 });
 
 test('archiving takes it off the list and back', async () => {
