@@ -1,6 +1,6 @@
 import { HttpClient, provideHttpClient, withInterceptors } from '@angular/common/http';
 import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
-import { Component } from '@angular/core';
+import { ChangeDetectionStrategy, Component } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { provideRouter, Router } from '@angular/router';
 import { RouterTestingHarness } from '@angular/router/testing';
@@ -10,7 +10,7 @@ import { allowed, notYetSetUp, setUpFirst, signedIn, signedOut } from './guards'
 import { SessionStore } from './session';
 import { sessionExpiry } from './session-expiry';
 
-@Component({ template: 'page' })
+@Component({ template: 'page', changeDetection: ChangeDetectionStrategy.OnPush })
 class Page {}
 
 const session = (role: Role | null, more: Partial<Session> = {}): Session => ({

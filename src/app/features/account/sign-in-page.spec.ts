@@ -1,6 +1,6 @@
 import { provideHttpClient } from '@angular/common/http';
 import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
-import { Component } from '@angular/core';
+import { ChangeDetectionStrategy, Component } from '@angular/core';
 import { DeferBlockBehavior, TestBed } from '@angular/core/testing';
 import { provideRouter, Router, withComponentInputBinding } from '@angular/router';
 import { RouterTestingHarness } from '@angular/router/testing';
@@ -8,7 +8,7 @@ import { SessionStore } from '../../core/session';
 import { provideIcons } from '../../ui/provide-icons';
 import { SignInPage } from './sign-in-page';
 
-@Component({ template: 'elsewhere' })
+@Component({ template: 'elsewhere', changeDetection: ChangeDetectionStrategy.OnPush })
 class Elsewhere {}
 
 let http: HttpTestingController;

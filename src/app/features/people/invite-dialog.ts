@@ -53,10 +53,11 @@ export class InviteDialog {
   private readonly api = inject(PeopleApi);
   private readonly dialog = inject<MatDialogRef<InviteDialog, Invitation>>(MatDialogRef);
 
-  protected readonly form = inject(NonNullableFormBuilder).group({
+  private readonly fields = inject(NonNullableFormBuilder);
+  protected readonly form = this.fields.group({
     name: ['', zodField(name)],
     email: ['', zodField(email)],
-    role: ['restorer' as Role],
+    role: this.fields.control<Role>('restorer'),
   });
   protected readonly submission = new FormSubmission(this.form);
   protected readonly fieldError = fieldError;

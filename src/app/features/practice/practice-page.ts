@@ -63,7 +63,8 @@ export class PracticePage implements HoldsUnsaved {
   /** The settings that somebody else changed meanwhile to something else than here. */
   protected readonly conflict = signal<{ theirs: Settings; differing: readonly SettingName[] } | null>(null);
 
-  protected readonly form = inject(NonNullableFormBuilder).group({
+  private readonly fields = inject(NonNullableFormBuilder);
+  protected readonly form = this.fields.group({
     name: ['', zodField(shape.name)],
     address: ['', zodField(shape.address)],
     phone: ['', zodField(shape.phone)],
@@ -71,11 +72,11 @@ export class PracticePage implements HoldsUnsaved {
     labourRate: ['', zodField(shape.labourRate)],
     partsMarkupPercent: ['', zodField(shape.partsMarkupPercent)],
     outsideMarkupPercent: ['', zodField(shape.outsideMarkupPercent)],
-    taxTreatment: ['none' as TaxTreatment],
+    taxTreatment: this.fields.control<TaxTreatment>('none'),
     taxRatePercent: ['', zodField(shape.taxRatePercent)],
     taxNote: ['', zodField(shape.taxNote)],
     depositPercent: ['', zodField(shape.depositPercent)],
-    paperSize: ['letter' as PaperSize],
+    paperSize: this.fields.control<PaperSize>('letter'),
   });
   protected readonly submission = new FormSubmission(this.form);
   protected readonly fieldError = fieldError;
