@@ -9,6 +9,7 @@ const node = (displayName, testMatch, extra = {}) => ({
 });
 
 export default {
+  maxWorkers: 2,
   projects: [
     node('domain', ['<rootDir>/src/domain/**/*.spec.ts', '<rootDir>/src/contracts/**/*.spec.ts']),
     node('server', [

@@ -22,7 +22,16 @@ const WINDOWS = [
   { name: '390 dark', width: 390, scheme: 'dark' },
 ] as const;
 
-async function contextOf(width: number, colorScheme: 'light' | 'dark', who: string | null): Promise<BrowserContext> {
+/** One signed-in context for a window and a person; each page is a tab of it. */
+const contexts = new Map<string, Promise<BrowserContext>>();
+function contextFor(width: number, colorScheme: 'light' | 'dark', who: string | null): Promise<BrowserContext> {
+  const key = `${width} ${colorScheme} ${who}`;
+  const context = contexts.get(key) ?? newContext(width, colorScheme, who);
+  contexts.set(key, context);
+  return context;
+}
+
+async function newContext(width: number, colorScheme: 'light' | 'dark', who: string | null): Promise<BrowserContext> {
   const context = await browser.newContext({
     baseURL: server.address,
     viewport: { width, height: 844 },
@@ -67,7 +76,7 @@ const PAGES = [
 
 describe.each(WINDOWS)('$name', ({ width, scheme }) => {
   test.each(PAGES)('%s as %s', async (path, who, words) => {
-    const context = await contextOf(width, scheme, who);
+    const context = await contextFor(width, scheme, who);
     const ids = who === null || !path.includes('{') ? {} : await idsFor(context);
     const page = await context.newPage();
     const troubles: string[] = [];
@@ -77,13 +86,13 @@ describe.each(WINDOWS)('$name', ({ width, scheme }) => {
     });
     await page.goto(path.replace(/\{(\w+)\}/g, (_, name: string) => String(ids[name])));
     await page.getByText(words).filter({ visible: true }).first().waitFor({ timeout: 15_000 });
-    await page.waitForLoadState('networkidle');
+    await page.waitForFunction(() => document.fonts.status === 'loaded');
     expect(await page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth)).toBeLessThanOrEqual(0);
     expect(await page.locator('h1').count()).toBeGreaterThan(0);
     expect(await page.evaluate(() => document.fonts.check('16px Lato'))).toBe(true);
     expect(await seriousFindings(page)).toEqual([]);
     expect(troubles).toEqual([]);
-    await context.close();
+    await page.close();
   });
 });
 
