@@ -50,6 +50,7 @@ export class Shell {
   private readonly find = viewChild<ElementRef<HTMLInputElement>>('find');
 
   protected readonly user = this.sessions.user;
+  protected readonly needsSetup = computed(() => this.sessions.session()?.needsSetup === true);
   protected readonly roleLabel = computed(() => ROLE_LABELS[this.user()?.role ?? 'collector']);
   protected readonly initials = computed(() =>
     (this.user()?.name ?? '')

@@ -32,6 +32,16 @@ const NARROW_UNDER = 560;
   styles: `
     :host {
       display: block;
+
+      /* the strip of phones stands on the glass here: its inks are the glass's */
+      --mat-sys-surface-container-lowest: var(--tw-glass);
+      --mat-sys-on-surface: var(--tw-glass-text);
+      --mat-sys-on-surface-variant: var(--tw-glass-soft);
+      --mat-sys-outline: var(--tw-glass-tick);
+      --tw-ink-soft: var(--tw-glass-tick-d);
+      --tw-data-uplift: var(--tw-glass-curve);
+      --tw-needle: var(--tw-glass-needle);
+      --tw-on-needle: var(--tw-glass-on-needle);
     }
     p {
       margin-top: 12px;

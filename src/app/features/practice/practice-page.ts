@@ -80,6 +80,8 @@ export class PracticePage implements HoldsUnsaved {
   });
   protected readonly submission = new FormSubmission(this.form);
   protected readonly fieldError = fieldError;
+  protected readonly taxHint =
+    'States differ on whether repair labour is taxed. Ask the tax authority of yours, or whoever does your taxes.';
   protected readonly treatments = TAX_TREATMENTS.map((value) => ({ value, label: TAX_TREATMENT_LABELS[value] }));
   protected readonly papers = PAPER_SIZES.map((value) => ({ value, label: PAPER_LABELS[value] }));
 
