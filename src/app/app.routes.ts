@@ -1,12 +1,12 @@
 import type { Routes } from '@angular/router';
-import { allowed, notYetSetUp, setUpFirst, signedIn, signedOut } from './core/guards';
+import { allowed, notYetSetUp, setUpFirst, signedIn, signedOut, startPage } from './core/guards';
 
 export const APP_ROUTES: Routes = [
   {
     path: '',
     canActivateChild: [setUpFirst],
     children: [
-      { path: '', pathMatch: 'full', redirectTo: 'then-and-now' },
+      { path: '', pathMatch: 'full', redirectTo: startPage },
       {
         path: 'then-and-now',
         loadChildren: () => import('./features/then-and-now/then-and-now.routes').then((m) => m.THEN_AND_NOW_ROUTES),

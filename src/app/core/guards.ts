@@ -1,5 +1,5 @@
 import { inject } from '@angular/core';
-import { Router, type CanActivateFn } from '@angular/router';
+import { Router, type CanActivateFn, type RedirectFunction } from '@angular/router';
 import type { Action } from '../../domain/access/policy';
 import { HOME } from './navigation';
 import { SessionStore } from './session';
@@ -17,6 +17,10 @@ export const allowed =
     if (session.user() === null) return signedIn(route, state);
     return session.can(action) || inject(Router).createUrlTree(['/not-allowed']);
   };
+
+/** Where the bare address leads: a clean practice names its first administrator, any other restates a price. */
+export const startPage: RedirectFunction = () =>
+  inject(SessionStore).session()?.needsSetup === true ? '/set-up' : '/then-and-now';
 
 /** A clean practice names its first administrator before anything else. */
 export const setUpFirst: CanActivateFn = (_route, state) =>

@@ -6,7 +6,7 @@ import { provideRouter, Router } from '@angular/router';
 import { RouterTestingHarness } from '@angular/router/testing';
 import type { Session } from '../../contracts/session';
 import type { Role } from '../../domain/access/policy';
-import { allowed, notYetSetUp, setUpFirst, signedIn, signedOut } from './guards';
+import { allowed, notYetSetUp, setUpFirst, signedIn, signedOut, startPage } from './guards';
 import { SessionStore } from './session';
 import { sessionExpiry } from './session-expiry';
 
@@ -34,6 +34,7 @@ function start(of: Session) {
           path: '',
           canActivateChild: [setUpFirst],
           children: [
+            { path: '', pathMatch: 'full', redirectTo: startPage },
             { path: 'people', canActivate: [allowed('user.manage')], component: Page },
             { path: 'account', canActivate: [signedIn], component: Page },
             { path: 'sign-in', canActivate: [signedOut], component: Page },
@@ -138,6 +139,12 @@ describe('guards', () => {
     start(session(null, { needsSetup: true }));
     expect(await landsOn('/sign-in')).toBe('/set-up');
     expect(await landsOnAgain('/then-and-now')).toBe('/then-and-now');
+    expect(await landsOnAgain('/')).toBe('/set-up');
+  });
+
+  it('lead from the bare address to the public page', async () => {
+    start(session(null));
+    expect(await landsOn('/')).toBe('/then-and-now');
   });
 
   it('close setting up once it is done', async () => {
