@@ -1,3 +1,4 @@
+import { PROBLEMS } from '../../src/contracts/problem';
 import { PASSWORD, startTestApp, type TestApp } from '../support/harness';
 
 let app: TestApp;
@@ -153,6 +154,21 @@ describe('one’s own account', () => {
       .send({ ...RESTORER, password: newPassword })
       .expect(200);
   });
+
+  test('ten wrong present passwords are enough; neither a stranger nor a colleague uses them up', async () => {
+    const [restorer, appraiser, stranger] = [
+      await app.agentAs('restorer'),
+      await app.agentAs('appraiser'),
+      app.anyone(),
+    ];
+    const guess = { currentPassword: 'a wrong guess', newPassword: 'a much longer phrase' };
+    for (let n = 0; n < 11; n++) await stranger.put('/api/session/password').send(guess);
+    for (let n = 0; n < 10; n++) await restorer.put('/api/session/password').send(guess).expect(400);
+    const right = { ...guess, currentPassword: PASSWORD };
+    const { body } = await restorer.put('/api/session/password').send(right).expect(429);
+    expect(body.type).toBe('/problems/too-many-attempts');
+    await appraiser.put('/api/session/password').send(right).expect(204);
+  });
 });
 
 describe('people', () => {
@@ -174,6 +190,24 @@ describe('people', () => {
     await app.anyone().post(`/api/invitations/${body.token}`).send({ password: 'long enough for this' }).expect(404);
   });
 
+  test('an invitation accepted twice at once lets one in', async () => {
+    const { token } = (await (await app.agentAs('administrator')).post('/api/users').send(NEW)).body;
+    const passwords = ['the first password', 'the second password'];
+    const answers = await Promise.all(
+      passwords.map((password) => app.anyone().post(`/api/invitations/${token}`).send({ password })),
+    );
+    expect(answers.map(({ status }) => status).sort()).toEqual([200, 404]);
+    const accepted = passwords[answers.findIndex(({ status }) => status === 200)];
+    await app.anyone().post('/api/session').send({ email: NEW.email, password: accepted }).expect(200);
+  });
+
+  test('somebody disabled before accepting cannot accept', async () => {
+    const administrator = await app.agentAs('administrator');
+    const { token, user } = (await administrator.post('/api/users').send(NEW)).body;
+    await administrator.patch(`/api/users/${user.id}`).send({ disabled: true }).expect(200);
+    await app.anyone().post(`/api/invitations/${token}`).send({ password: 'long enough for this' }).expect(404);
+  });
+
   test('an invitation runs out after a week; a renewed one replaces it', async () => {
     const administrator = await app.agentAs('administrator');
     const first = (await administrator.post('/api/users').send(NEW)).body;
@@ -182,6 +216,16 @@ describe('people', () => {
     await app.anyone().get(`/api/invitations/${renewed.token}`).expect(200);
     app.clock.now += 8 * 86_400_000;
     await app.anyone().get(`/api/invitations/${renewed.token}`).expect(404);
+    await app.anyone().post(`/api/invitations/${renewed.token}`).send({ password: 'long enough now' }).expect(404);
+  });
+
+  test('somebody who has accepted is not invited again', async () => {
+    const administrator = await app.agentAs('administrator');
+    const { items } = (await administrator.get('/api/users')).body;
+    const { id } = items.find((u: { role: string }) => u.role === 'restorer');
+    const { body } = await administrator.post(`/api/users/${id}/invitation`).expect(409);
+    expect(body.type).toBe('/problems/not-allowed-now');
+    await administrator.post('/api/users/999999/invitation').expect(404);
   });
 
   test('an address can be invited once', async () => {
@@ -193,14 +237,18 @@ describe('people', () => {
     expect(body).toMatchObject({ type: '/problems/already-exists', fields: [{ field: 'email' }] });
   });
 
-  test('somebody disabled is out at once and cannot sign in; enabled again they can', async () => {
+  test('somebody disabled is out at once and cannot sign in; enabled again they sign in anew', async () => {
     const [administrator, restorer] = [await app.agentAs('administrator'), await app.agentAs('restorer')];
+    const elsewhere = await app.agentAs('restorer');
     const { items } = (await administrator.get('/api/users')).body;
     const { id } = items.find((u: { role: string }) => u.role === 'restorer');
     expect((await administrator.patch(`/api/users/${id}`).send({ disabled: true })).body.state).toBe('disabled');
     expect((await restorer.get('/api/sets')).status).toBe(401);
-    await app.anyone().post('/api/session').send(RESTORER).expect(401);
+    const refused = (await app.anyone().post('/api/session').send(RESTORER).expect(401)).body;
+    expect(refused).toMatchObject({ type: '/problems/wrong-credentials', title: PROBLEMS['wrong-credentials'].title });
+    expect(refused.detail).toBeUndefined();
     await administrator.patch(`/api/users/${id}`).send({ disabled: false }).expect(200);
+    expect((await elsewhere.get('/api/sets')).status).toBe(401);
     await app.anyone().post('/api/session').send(RESTORER).expect(200);
   });
 
@@ -214,6 +262,17 @@ describe('people', () => {
       expect((await administrator.get('/api/users')).status).toBe(200);
     },
   );
+
+  test('an administrator may step down once another one can sign in, not while one is only invited', async () => {
+    const administrator = await app.agentAs('administrator');
+    const { id } = (await administrator.get('/api/session')).body.user;
+    const second = { name: 'Second', email: 'second@test.example', role: 'administrator' };
+    const { token } = (await administrator.post('/api/users').send(second)).body;
+    await administrator.patch(`/api/users/${id}`).send({ role: 'restorer' }).expect(409);
+    await app.anyone().post(`/api/invitations/${token}`).send({ password: 'long enough for this' }).expect(200);
+    await administrator.patch(`/api/users/${id}`).send({ role: 'restorer' }).expect(200);
+    await administrator.get('/api/users').expect(403);
+  });
 
   test('lists answer items and total', async () => {
     const { body } = await (await app.agentAs('administrator')).get('/api/users');
@@ -263,41 +322,5 @@ describe('a clean practice', () => {
       ),
     );
     expect(answers.map(({ status }) => status).sort()).toEqual([201, 409]);
-  });
-});
-
-describe('the practice', () => {
-  test('its settings change by whoever saw the newest; a late change is told what stands', async () => {
-    const administrator = await app.agentAs('administrator');
-    const { body: before } = await administrator.get('/api/practice').expect(200);
-    const changed = { ...before, labourRate: '68.50', taxTreatment: 'parts', taxRatePercent: '6.875' };
-    const { body: after } = await administrator.put('/api/practice').send(changed).expect(200);
-    expect(after).toMatchObject({ labourRate: '68.50', taxRatePercent: '6.875', version: before.version + 1 });
-    const late = await administrator
-      .put('/api/practice')
-      .send({ ...changed, labourRate: '1.00' })
-      .expect(409);
-    expect(late.body).toMatchObject({ type: '/problems/edit-conflict', current: { labourRate: '68.50' } });
-    expect((await administrator.get('/api/practice')).body.labourRate).toBe('68.50');
-  });
-
-  test.each([
-    ['labourRate', '68,50'],
-    ['labourRate', '-1'],
-    ['taxRatePercent', '6.87501'],
-    ['depositPercent', '101'],
-    ['taxTreatment', 'everything'],
-    ['paperSize', 'foolscap'],
-    ['name', '  '],
-    ['labourRate', null],
-  ])('%s = %j answers 400 naming it', async (field, value) => {
-    const administrator = await app.agentAs('administrator');
-    const { body: before } = await administrator.get('/api/practice');
-    const { body } = await administrator
-      .put('/api/practice')
-      .send({ ...before, [field]: value })
-      .expect(400);
-    expect(body.fields.map((f: { field: string }) => f.field)).toEqual([field]);
-    expect((await administrator.get('/api/practice')).body).toEqual(before);
   });
 });

@@ -3,7 +3,7 @@ import { formatDate } from '../../../domain/calendar/period';
 import { formatMoney } from '../../../domain/money/money';
 import { VALUE_TYPE_LABELS } from '../../../domain/sets/terms';
 
-interface Money {
+export interface Money {
   readonly amount: string;
   readonly currency: string;
 }

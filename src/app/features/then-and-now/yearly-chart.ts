@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input, signal, type Signal } from '@angular/core';
 import { MatButtonToggleModule } from '@angular/material/button-toggle';
 import type { ChartConfiguration } from 'chart.js';
 import { BaseChartDirective } from 'ng2-charts';
@@ -77,7 +77,7 @@ export class YearlyChart {
     };
   });
 
-  protected readonly options = computed<ChartConfiguration<'line'>['options']>(() => {
+  protected readonly options: Signal<ChartConfiguration<'line'>['options']> = computed(() => {
     const colours = this.theme.colours();
     const { currency } = this.shown();
     const amounts = this.amounts();

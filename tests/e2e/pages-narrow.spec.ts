@@ -1,0 +1,3 @@
+import { describeEveryPage } from '../support/every-page';
+
+describeEveryPage(390, 'dark');
