@@ -52,9 +52,12 @@ export function accountsRoutes(deps: { readonly accounts: AccountsService; reado
       authenticate(req, res, () => resolve(null));
     });
 
-  router.post(signIn.path, guessLimit());
-  router.put(changePassword.path, guessLimit());
-  router.post(acceptInvitation.path, guessLimit());
+  router.post(signIn.path, guessLimit(emailIn));
+  router.put(changePassword.path, guessLimit(userIdOf));
+  router.post(
+    acceptInvitation.path,
+    guessLimit(() => ''),
+  );
 
   route(router, getSession, ({ actor }) => accounts.session(actor));
   route(router, signIn, async ({ req, res }) => {
@@ -88,15 +91,15 @@ export function accountsRoutes(deps: { readonly accounts: AccountsService; reado
   return router;
 }
 
-/** Ten failures in a quarter of an hour, by caller and e-mail address; what succeeds does not count. */
-function guessLimit() {
+/** Ten failures in a quarter of an hour, by the caller's address and `whose`; what succeeds does not count. */
+function guessLimit(whose: (req: Request) => string) {
   return rateLimit({
     windowMs: WINDOW_MINUTES * 60_000,
     limit: FAILURES_ALLOWED,
     skipSuccessfulRequests: true,
     standardHeaders: 'draft-8',
     legacyHeaders: false,
-    keyGenerator: (req) => `${ipKeyGenerator(req.ip ?? '')} ${emailIn(req.body)}`,
+    keyGenerator: (req) => `${ipKeyGenerator(req.ip ?? '')} ${whose(req)}`,
     handler: (_req, res) =>
       sendProblem(res, 'too-many-attempts', {
         detail: `Too many attempts. Wait ${WINDOW_MINUTES} minutes, then try again.`,
@@ -104,7 +107,13 @@ function guessLimit() {
   });
 }
 
-function emailIn(body: unknown): string {
+/** Empty for nobody, so that strangers use up no one's attempts. */
+function userIdOf(req: Request): string {
+  return String((req.user as Actor | undefined)?.userId ?? '');
+}
+
+function emailIn(req: Request): string {
+  const body: unknown = req.body;
   const email: unknown = typeof body === 'object' && body !== null ? (body as { email?: unknown }).email : undefined;
   return typeof email === 'string' ? email.trim().toLowerCase().slice(0, 254) : '';
 }

@@ -61,6 +61,9 @@ export function createAccountsService(deps: {
     return row;
   }
 
+  const settled = () =>
+    new ProblemError('not-allowed-now', { detail: 'The practice has its administrator already. Sign in.' });
+
   function invitationOf(row: UserRow, token: string, expiresAt: number) {
     return {
       user: shown({ ...row, invitationExpiresAt: expiresAt }),
@@ -91,6 +94,7 @@ export function createAccountsService(deps: {
       repo.sessions.endExpired(now());
     },
 
+    /** Names the first administrator and makes the practice's row; refused once anyone can sign in. */
     async setUp(input: {
       readonly practiceName: string;
       readonly name: string;
@@ -98,13 +102,13 @@ export function createAccountsService(deps: {
       readonly password: string;
       readonly demo?: boolean;
     }): Promise<Actor> {
+      if (repo.anyoneWithPassword()) throw settled(); // before the costly hash: anyone may call this
       const passwordHash = await hash(input.password);
       const row = repo.insertFirst(
         { name: input.name, email: input.email, role: 'administrator', passwordHash, createdAt: now() },
         () => practice.establish({ name: input.practiceName, demo: input.demo ?? false }),
       );
-      if (row === null)
-        throw new ProblemError('not-allowed-now', { detail: 'The practice has its administrator already. Sign in.' });
+      if (row === null) throw settled();
       return actorOf(row);
     },
 
@@ -168,7 +172,9 @@ export function createAccountsService(deps: {
       return { name, email, role, practiceName: practice.settings()?.name ?? '' };
     },
 
+    /** Spends an invitation; looked up before the costly hash, and again after it in case it was spent meanwhile. */
     async accept(token: string, password: string): Promise<Actor> {
+      invited(token);
       const passwordHash = await hash(password);
       const row = invited(token);
       repo.setPassword(row.id, passwordHash);
