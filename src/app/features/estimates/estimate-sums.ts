@@ -2,8 +2,9 @@ import { ChangeDetectionStrategy, Component, computed, input } from '@angular/co
 import { RouterLink } from '@angular/router';
 import type { EstimateDetail } from '../../../contracts/estimates';
 import { TAX_TREATMENT_LABELS } from '../../../domain/estimate/terms';
-import { formatMoney } from '../../../domain/money/money';
+import { hasRange } from '../../../domain/estimate/totals';
 import { worthInForce } from '../../../domain/market/worth';
+import { formatMoney } from '../../../domain/money/money';
 import { CostAgainstWorth } from '../../ui/cost-against-worth';
 import { VerdictMark } from '../../ui/verdict-mark';
 
@@ -19,10 +20,7 @@ export class EstimateSums {
   readonly estimate = input.required<EstimateDetail>();
 
   protected readonly treatment = computed(() => TAX_TREATMENT_LABELS[this.estimate().taxTreatment]);
-  protected readonly hasRange = computed(() => {
-    const { low, high } = this.estimate().totals;
-    return low.total !== high.total;
-  });
+  protected readonly hasRange = computed(() => hasRange(this.estimate().totals));
   protected readonly figures = computed(() => {
     const { verdict, totals, set } = this.estimate();
     if (verdict === null) return null;
